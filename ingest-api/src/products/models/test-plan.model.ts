@@ -1,0 +1,15 @@
+import { Column, DataType, Model, Table } from 'sequelize-typescript';
+
+@Table({ tableName: 'test_plans' })
+export class TestPlan extends Model {
+  @Column({ type: DataType.INTEGER, primaryKey: true, autoIncrement: true }) declare testPlanId: number;
+  @Column(DataType.INTEGER) declare stageId: number;
+  @Column(DataType.INTEGER) declare version: number;
+  @Column(DataType.JSON) declare loadVolts: number[];
+  @Column(DataType.REAL) declare referenceVolts: number;
+  @Column(DataType.INTEGER) declare dwellMs: number;
+  @Column(DataType.BOOLEAN) declare repeatFirst: boolean;
+  @Column(DataType.BOOLEAN) declare upAndDown: boolean;
+  @Column(DataType.INTEGER) declare releasedAt: number;
+  @Column(DataType.INTEGER) declare effectiveAt: number;
+}
