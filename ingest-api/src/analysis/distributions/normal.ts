@@ -1,0 +1,32 @@
+import cdf from '@stdlib/stats-base-dists-normal-cdf';
+import quantile from '@stdlib/stats-base-dists-normal-quantile';
+import { requireProbability } from './arguments.js';
+
+/**
+ * Distribution function of the standard normal distribution, Φ(z) = ½·erfc(−z/√2).
+ *
+ * @param z - dimensionless; infinities give 0 and 1
+ * @returns the probability of a value not above `z`
+ * @see Abramowitz & Stegun, Handbook of Mathematical Functions, 26.2
+ */
+export function normalCdf(z: number): number {
+  return cdf(z, 0, 1);
+}
+
+/**
+ * Density of the standard normal distribution, φ(z) = exp(−z²/2)/√(2π).
+ */
+export function normalPdf(z: number): number {
+  return Math.exp(-0.5 * z * z) / Math.sqrt(2 * Math.PI);
+}
+
+/**
+ * Quantile of the standard normal distribution, Φ⁻¹(p).
+ *
+ * @param probability - 0 to 1; the ends give ∓infinity
+ * @throws RangeError outside [0, 1]
+ */
+export function normalQuantile(probability: number): number {
+  requireProbability(probability, 'normalQuantile');
+  return quantile(probability, 0, 1);
+}
