@@ -6,6 +6,8 @@ import type { Env } from '../config/env.js';
 import { SessionsService } from '../users/sessions.service.js';
 import { AccessGuard } from './access.guard.js';
 import { jwtSecret } from './jwt-secret.js';
+import { RightsController } from './rights.controller.js';
+import { RightsService } from './rights.service.js';
 import { SessionCookie } from './session-cookie.js';
 import { StationKeyGuard } from './station-key.guard.js';
 
@@ -24,7 +26,9 @@ import { StationKeyGuard } from './station-key.guard.js';
       }),
     }),
   ],
+  controllers: [RightsController],
   providers: [
+    RightsService,
     SessionsService,
     SessionCookie,
     StationKeyGuard,

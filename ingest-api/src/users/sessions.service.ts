@@ -1,6 +1,5 @@
 import { randomBytes } from 'node:crypto';
 import { Inject, Injectable } from '@nestjs/common';
-import { type Observable, Subject } from 'rxjs';
 import { Op, QueryTypes, type Transaction } from 'sequelize';
 import type { Sequelize } from 'sequelize-typescript';
 import { InjectConnection } from '@nestjs/sequelize';
@@ -34,7 +33,6 @@ const findOpenSession = `
 @Injectable()
 export class SessionsService {
   private readonly remembered = new Map<string, Remembered>();
-  private readonly changes = new Subject<number>();
   /** Counts forgettings: what was read from the database before one may be stale after it. */
   private generation = 0;
 
@@ -42,11 +40,6 @@ export class SessionsService {
     @InjectConnection() private readonly sequelize: Sequelize,
     @Inject(CLOCK) private readonly clock: Clock,
   ) {}
-
-  /** Emits the userId whose sessions or rights changed: long answers (live events) end and ask anew. */
-  get changedUsers(): Observable<number> {
-    return this.changes.asObservable();
-  }
 
   /** Opens a session of 12 hours, inside the writer's transaction. */
   async open(transaction: Transaction, userId: number): Promise<Session> {
@@ -78,7 +71,6 @@ export class SessionsService {
     for (const [sessionId, { person }] of this.remembered) {
       if (person.userId === userId) this.remembered.delete(sessionId);
     }
-    this.changes.next(userId);
   }
 
   /** The person of an open session of an active account, else null. */

@@ -1,0 +1,8 @@
+import { Global, Module } from '@nestjs/common';
+import { AuditController } from './audit.controller.js';
+import { AuditService } from './audit.service.js';
+
+/** Global: whatever changes something writes its entry in the same transaction. */
+@Global()
+@Module({ controllers: [AuditController], providers: [AuditService], exports: [AuditService] })
+export class AuditModule {}
