@@ -15,6 +15,8 @@ export const createBreaches: Migration = {
         opened_at INTEGER NOT NULL,
         last_event_at INTEGER NOT NULL,
         event_count INTEGER NOT NULL,
+        latest_result_id INTEGER REFERENCES results (result_id),
+        mailed_at INTEGER,
         acknowledged_at INTEGER,
         acknowledged_by TEXT,
         note TEXT,
@@ -24,7 +26,7 @@ export const createBreaches: Migration = {
         action TEXT
       ) STRICT`,
       `CREATE UNIQUE INDEX breaches_one_open ON breaches (cause_key) WHERE state <> 'closed'`,
-      `CREATE INDEX breaches_state ON breaches (state, last_event_at)`,
+      `CREATE INDEX breaches_state ON breaches (state, breach_id)`,
       `CREATE TABLE breach_events (
         breach_event_id INTEGER PRIMARY KEY,
         breach_id INTEGER NOT NULL REFERENCES breaches (breach_id),
