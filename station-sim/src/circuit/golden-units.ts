@@ -1,16 +1,15 @@
+import type { ProductFacts } from './product-facts.js';
 import { products } from './products.js';
 import { createRandom } from './random.js';
 import { drawUnit, type Unit } from './unit.js';
 
 /** One kept unit per product; always the same circuits, whatever a run's seed. */
-export const goldenUnits: readonly Unit[] = products.map((product) =>
-  drawUnit(
-    product,
-    { serialNumber: `GOLD-${product.serialPrefix}-01`, lot: 'GOLDEN' },
-    createRandom('golden units of the line'),
-    { defect: null },
-  ),
-);
+export const goldenUnits = products.map((product) => drawGoldenUnit(product)) as [Unit, ...Unit[]];
+
+function drawGoldenUnit(product: ProductFacts): Unit {
+  const identity = { serialNumber: `GOLD-${product.serialPrefix}-01`, lot: 'GOLDEN' };
+  return drawUnit(product, identity, createRandom(`golden unit of ${product.partNumber}`), { defect: null });
+}
 
 /** @throws RangeError for a product without a golden unit */
 export function goldenUnitOf(partNumber: string): Unit {

@@ -15,6 +15,7 @@ export interface TestRun {
   runKind: ResultPost['runKind'];
   startedAt: Date;
   operator: string;
+  channel?: string;
   programVersion: string;
   ambientCelsius: number;
   /** Why the run was broken off; left out, it runs to its end. */
@@ -28,17 +29,23 @@ const READING_MS = 100;
 /** Seconds in which a module on its fixture comes close to its final temperature. */
 const WARM_UP_SECONDS = 6;
 
-/** Steps a load through the plan and writes the post a station would send. Same source, same post. */
+/** Milliseconds from the first step to the end of the last dwell. */
+export function sweepMs(stage: StageFacts): number {
+  const { dwellMs } = stage.testPlan;
+  return (plannedSteps(stage).length - 1) * (dwellMs + READING_MS) + dwellMs;
+}
+
+/**
+ * Steps a load through the plan and writes the post a station would send. Give it a source of its own:
+ * the same source and start give the same post, and another start changes nothing but times and id.
+ */
 export function simulateSweep(unit: Unit, bench: Bench, run: TestRun, random: RandomSource): ResultPost {
-  const own = random.fork(
-    `sweep ${run.runKind} ${unit.serialNumber} ${run.stage.stage} ${run.startedAt.toISOString()}`,
-  );
-  const points = measurePoints(unit, bench, run, own);
+  const points = measurePoints(unit, bench, run, random);
   const outcome = run.abortReason ? 'aborted' : stopsEarly(points, run) ? 'stoppedOnFail' : 'completed';
   const lastMs = points.at(-1)?.elapsedMs ?? 0;
   const finishedAt = new Date(run.startedAt.getTime() + lastMs + run.stage.testPlan.dwellMs);
   return {
-    resultId: seededUuid(run.startedAt, own),
+    resultId: seededUuid(run.startedAt, random),
     runKind: run.runKind,
     outcome,
     ...(run.abortReason ? { abortReason: run.abortReason } : {}),
@@ -46,16 +53,16 @@ export function simulateSweep(unit: Unit, bench: Bench, run: TestRun, random: Ra
     serialNumber: unit.serialNumber,
     lot: unit.lot,
     stage: run.stage.stage,
-    channel: '1',
+    channel: run.channel ?? '1',
     startedAt: run.startedAt.toISOString(),
     finishedAt: finishedAt.toISOString(),
-    sentAt: new Date(finishedAt.getTime() + own.integer(60, 240)).toISOString(),
+    sentAt: new Date(finishedAt.getTime() + random.integer(60, 240)).toISOString(),
     testPlanVersion: run.stage.testPlan.version,
     program: { name: `fh-${run.stage.stage}`, version: run.programVersion },
     operator: run.operator,
     fixture: bench.fixture,
     ambientCelsius: round(run.ambientCelsius, 1),
-    supplyVolts: round(run.product.supplyVolts + own.normal(0, 0.002), 3),
+    supplyVolts: round(run.product.supplyVolts + random.normal(0, 0.002), 3),
     dwellMs: run.stage.testPlan.dwellMs,
     ...postedInstruments(bench),
     points,

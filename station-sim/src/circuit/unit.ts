@@ -44,41 +44,40 @@ const defectKinds: readonly [Defect, ...Defect[]] = [
   'openOutput',
 ];
 
-/** Draws a unit; the same source and serial number always give the same unit, so it can be tested again. */
+/** Draws a unit from a source of its own (fork one by the unit's running number). */
 export function drawUnit(
   product: ProductFacts,
   identity: UnitIdentity,
   random: RandomSource,
   options: DrawOptions = {},
 ): Unit {
-  const own = random.fork(`unit ${product.partNumber} ${identity.serialNumber}`);
   const { circuit } = product;
   const sound: Unit = {
     partNumber: product.partNumber,
     ...identity,
-    earlyVolts: own.normal(options.earlyVolts ?? circuit.earlyVolts, circuit.earlyVoltsSpread),
-    beta: own.normal(circuit.beta, circuit.betaSpread),
-    mismatch: own.normal(0, circuit.mismatchSpread),
-    setResistorError: own.normal(0, circuit.setResistorSpread),
+    earlyVolts: random.normal(options.earlyVolts ?? circuit.earlyVolts, circuit.earlyVoltsSpread),
+    beta: random.normal(circuit.beta, circuit.betaSpread),
+    mismatch: random.normal(0, circuit.mismatchSpread),
+    setResistorError: random.normal(0, circuit.setResistorSpread),
     seriesOhms: 0.1,
     leakageOhms: null,
     openOutput: false,
     defect: null,
   };
-  const drawn = own.chance(DEFECT_SHARE) ? own.pick(defectKinds) : null;
+  const drawn = random.chance(DEFECT_SHARE) ? random.pick(defectKinds) : null;
   const defect = options.defect === undefined ? drawn : options.defect;
-  return defect ? { ...sound, ...damage(defect, product, own), defect } : sound;
+  return defect ? { ...sound, ...damage(defect, product, random), defect } : sound;
 }
 
 function damage(defect: Defect, product: ProductFacts, random: RandomSource): Partial<Unit> {
   switch (defect) {
     case 'leakyTransistor':
-      return { leakageOhms: impedanceFloorOhms(product) * random.between(0.3, 0.8) };
+      return { leakageOhms: impedanceFloorOhms(product) * random.between(0.55, 0.9) };
     case 'wrongSetResistor':
       // The neighbouring value of the E96 series, 2.4 % away, was fitted.
       return { setResistorError: random.chance(0.5) ? 0.0243 : -0.0238 };
     case 'crackedJoint':
-      return { seriesOhms: random.between(1.2, 3) / product.nominalAmps };
+      return { seriesOhms: random.between(2.1, 3.5) / product.nominalAmps };
     case 'openOutput':
       return { openOutput: true };
   }
