@@ -1,10 +1,13 @@
 import { Module } from '@nestjs/common';
 import { MailModule } from '../mail/mail.module.js';
 import { BreachRecorder } from './breach-recorder.js';
+import { BreachesController } from './breaches.controller.js';
+import { BreachesService } from './breaches.service.js';
 
 @Module({
   imports: [MailModule],
-  providers: [BreachRecorder],
-  exports: [BreachRecorder],
+  controllers: [BreachesController],
+  providers: [BreachRecorder, BreachesService],
+  exports: [BreachRecorder, BreachesService],
 })
 export class BreachesModule {}

@@ -1,7 +1,8 @@
 import { Column, DataType, Model, Table } from 'sequelize-typescript';
 import type { MeasureName } from '../../analysis/analysis.types.js';
 
-export type BreachState = 'open' | 'acknowledged' | 'closed';
+export const breachStates = ['open', 'acknowledged', 'closed'] as const;
+export type BreachState = (typeof breachStates)[number];
 
 /** What was broken: a measure's limit, or the station stopped the unit without a measure to blame. */
 export type BreachMeasure = MeasureName | 'stoppedOnFail';
