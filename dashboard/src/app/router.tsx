@@ -1,0 +1,29 @@
+import { createBrowserRouter, type RouteObject } from 'react-router-dom';
+import { NotFound } from '@/components/errors/not-found';
+import { RouteError } from '@/components/errors/route-error';
+import { SignedInRoute } from './routes/signed-in';
+
+/** Every page is fetched when it is first opened. */
+export const routes: RouteObject[] = [
+  {
+    path: '/sign-in',
+    lazy: async () => ({ Component: (await import('./routes/sign-in')).SignInRoute }),
+    ErrorBoundary: RouteError,
+  },
+  {
+    path: '/',
+    Component: SignedInRoute,
+    ErrorBoundary: RouteError,
+    children: [
+      {
+        ErrorBoundary: RouteError,
+        children: [
+          { index: true, lazy: async () => ({ Component: (await import('./routes/today')).TodayRoute }) },
+          { path: '*', Component: NotFound },
+        ],
+      },
+    ],
+  },
+];
+
+export const createRouter = () => createBrowserRouter(routes);

@@ -1,0 +1,25 @@
+/** Every address inside the dashboard. */
+export const paths = {
+  today: () => '/',
+  signIn: (from?: string) =>
+    from && from !== '/' ? `/sign-in?from=${encodeURIComponent(from)}` : '/sign-in',
+  units: (query: Record<string, string> = {}) => withQuery('/units', query),
+  unit: (partNumber: string, serialNumber: string, resultId?: string) =>
+    withQuery(
+      `/units/${encodeURIComponent(partNumber)}/${encodeURIComponent(serialNumber)}`,
+      resultId ? { result: resultId } : {},
+    ),
+  stations: () => '/stations',
+  breaches: (query: Record<string, string> = {}) => withQuery('/breaches', query),
+  breach: (breachId: string) => `/breaches/${encodeURIComponent(breachId)}`,
+  intake: (query: Record<string, string> = {}) => withQuery('/intake', query),
+  connect: () => '/connect',
+  settings: () => '/settings',
+  proof: () => '/settings/proof',
+  mailbox: () => '/mailbox',
+};
+
+function withQuery(path: string, query: Record<string, string>): string {
+  const search = new URLSearchParams(query).toString();
+  return search ? `${path}?${search}` : path;
+}

@@ -1,0 +1,39 @@
+import '@testing-library/jest-dom/vitest';
+import { cleanup } from '@testing-library/react';
+import { afterEach, beforeEach, vi } from 'vitest';
+import { FakeEventSource } from './fake-event-source';
+
+class NoObserver {
+  observe() {}
+  unobserve() {}
+  disconnect() {}
+  takeRecords() {
+    return [];
+  }
+}
+
+// What jsdom lacks and the component library asks for while it is imported.
+HTMLCanvasElement.prototype.getContext = () => null;
+Element.prototype.scrollTo = () => {};
+window.scrollTo = () => {};
+vi.stubGlobal('ResizeObserver', NoObserver);
+vi.stubGlobal('IntersectionObserver', NoObserver);
+vi.stubGlobal('EventSource', FakeEventSource);
+vi.stubGlobal('matchMedia', (query: string) => ({
+  matches: false,
+  media: query,
+  addEventListener() {},
+  removeEventListener() {},
+  addListener() {},
+  removeListener() {},
+}));
+
+beforeEach(() => {
+  localStorage.clear();
+  document.documentElement.dataset.theme = 'day';
+});
+
+afterEach(() => {
+  cleanup();
+  FakeEventSource.reset();
+});
