@@ -3,7 +3,8 @@
  * otherwise; instruments' accuracies are in percent because data sheets state them so.
  */
 
-export type CircuitKind = 'twoTransistorMirror' | 'wilsonMirror' | 'cascode' | 'opAmpPassTransistor' | 'other';
+export type CircuitKind =
+  'twoTransistorMirror' | 'wilsonMirror' | 'cascode' | 'opAmpPassTransistor' | 'other';
 export type PointDirection = 'up' | 'down' | 'repeat';
 export type Outcome = 'completed' | 'stoppedOnFail' | 'aborted';
 export type Verdict = 'pass' | 'fail' | 'notProven' | 'unjudged' | 'aborted';
@@ -108,7 +109,7 @@ export interface LineFit {
 
 export interface ComplianceFinding {
   kneeFound: boolean;
-  /** Null when it could not be told (fewer than 4 points). */
+  /** Null when it could not be told (no usable point, or fewer than 4 for a seed line and one of them low). */
   complianceVolts: number | null;
   bound: Bound;
   /** The upper end of the fit set after a short compliance cut it. */
@@ -127,8 +128,9 @@ export interface SlopeUncertainty {
 }
 
 export interface OutputImpedance {
-  /** 1/ĝ; null only when the slope is exactly zero or not computed. */
+  /** 1/ĝ, negative when the current rises; null only when the slope is exactly zero. */
   estimateOhms: number | null;
+  /** Null when the current rises significantly (ĝ + U < 0): then there is no impedance. */
   lowOhms: number | null;
   /** Null when ĝ − U ≤ 0: no upper end exists. */
   highOhms: number | null;
@@ -142,6 +144,8 @@ export interface Measure {
   unit: string;
   /** The figure to show: the estimate, or the bound when `bound` is not `exact`. */
   value: number | null;
+  /** Given when `value` is a bound: the estimate it was drawn from, which judging compares with the limit. */
+  estimate?: number;
   expandedUncertainty: number | null;
   low: number | null;
   high: number | null;

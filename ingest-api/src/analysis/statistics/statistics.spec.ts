@@ -1,6 +1,5 @@
 import { compensatedSum } from './compensated-sum.js';
 import { medianInPlace } from './median.js';
-import { coverageFactor95, studentTQuantile } from './student-t.js';
 import { theilSenLine } from './theil-sen.js';
 import { univariateSummary } from './univariate-summary.js';
 
@@ -51,20 +50,5 @@ describe('theilSenLine', () => {
   it('ignores pairs at the same place and refuses points that are all there', () => {
     expect(theilSenLine([0, 0, 1], [1, 1, 3]).slope).toBe(2);
     expect(() => theilSenLine([1, 1], [1, 2])).toThrow('two different x');
-  });
-});
-
-describe('studentTQuantile', () => {
-  it('gives the factors of GUM table G.2', () => {
-    expect(studentTQuantile(0.975, 1)).toBeCloseTo(12.71, 2);
-    expect(studentTQuantile(0.995, 5)).toBeCloseTo(4.03, 2);
-    expect(coverageFactor95(10)).toBeCloseTo(2.228138852, 8);
-    expect(coverageFactor95(10)).toBe(coverageFactor95(10));
-    expect(coverageFactor95(2.5)).toBeGreaterThan(coverageFactor95(3));
-  });
-
-  it('refuses probabilities and degrees of freedom that have no quantile', () => {
-    expect(() => studentTQuantile(1, 3)).toThrow('between 0 and 1');
-    expect(() => studentTQuantile(0.5, 0)).toThrow('positive');
   });
 });

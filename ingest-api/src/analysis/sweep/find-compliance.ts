@@ -1,0 +1,180 @@
+import type { ComplianceFinding, PreparedPoint, ProductSpec } from '../analysis.types.js';
+import { theilSenLine, type RobustLine } from '../statistics/theil-sen.js';
+import { endTolerance, promisedSpan, sameVoltageWithin } from './same-voltage.js';
+
+/** A seed line is drawn through no fewer points than this. */
+const FEWEST_SEED_POINTS = 4;
+
+/** Below this share of the nominal current the unit delivers nothing, whatever its seed line says. */
+export const NO_CURRENT_SHARE = 0.1;
+
+export interface ComplianceSearch {
+  /** What is told; its `fitHighVolts` is the limit below, kept within the promised range. */
+  finding: ComplianceFinding;
+  /** Points above this voltage stay out of the fit: ∞ when nothing cuts it, −∞ when nothing is left. */
+  fitLimitVolts: number;
+  /** Where the tolerance was crossed between two points: null without a knee that lies between points. */
+  crossing: ToleranceCrossing | null;
+}
+
+export interface ToleranceCrossing {
+  volts: number;
+  /** Distance between the last inside and the first outside point. */
+  stepVolts: number;
+  /** How far the crossing moves when one of the two currents changes: V per A. */
+  voltsPerAmp: number;
+}
+
+/**
+ * Finds up to which load voltage the unit holds its current.
+ *
+ * Seed line Î(V): Theil–Sen through the points in the lower half of the promised range (at least 4). A point is
+ * outside when I < (1−τ)·Î (only loss of current counts) or when it carries less than a tenth of the nominal
+ * current. The knee is the first outside point that is followed by another one or by the end. The compliance
+ * voltage is where I/Î − 1 crosses −τ, interpolated linearly between the last inside and the first outside point;
+ * with no knee it is *at least* the highest tested voltage, with a knee at the first point *at most* that.
+ *
+ * With fewer than 4 points in the lower half no knee is claimed. The absence of one is still proven when all
+ * currents lie within τ of the largest.
+ *
+ * When the compliance voltage is short of V_hi the fit ends one load step below the last inside point and serves
+ * diagnosis only; a knee above V_hi merely keeps the points beyond it out.
+ *
+ * @param points - usable points by ascending voltage
+ */
+export function findCompliance(points: readonly PreparedPoint[], product: ProductSpec): ComplianceSearch {
+  const tested = points.filter(
+    (point) => point.loadVolts >= product.complianceLowVolts - endTolerance(product),
+  );
+  const highest = tested.at(-1);
+  if (highest === undefined) return untold('notMeasured', product);
+  if (deliversNothing(tested, product)) {
+    const lowest = tested[0]!.loadVolts;
+    return finding({ complianceVolts: lowest, bound: 'atMost', reason: 'noCurrent' }, Infinity, product);
+  }
+  const seed = seedLine(tested, product);
+  if (seed === null) {
+    return withinToleranceOfLargest(tested, product)
+      ? heldUpTo(highest, product)
+      : untold('fewPoints', product);
+  }
+  const knee = kneeIndex(tested, seed, product);
+  return knee === null ? heldUpTo(highest, product) : shortAt(tested, knee, seed, product);
+}
+
+/** Whether no point carries a tenth of the nominal current. */
+function deliversNothing(points: readonly PreparedPoint[], product: ProductSpec): boolean {
+  return points.every((point) => point.outputAmps < NO_CURRENT_SHARE * product.nominalAmps);
+}
+
+function seedLine(points: readonly PreparedPoint[], product: ProductSpec): RobustLine | null {
+  const middle = product.complianceLowVolts + promisedSpan(product) / 2;
+  const lower = points.filter((point) => point.loadVolts <= middle);
+  const first = lower[0];
+  const last = lower.at(-1);
+  if (first === undefined || last === undefined || lower.length < FEWEST_SEED_POINTS) return null;
+  if (last.loadVolts - first.loadVolts <= sameVoltageWithin(product)) return null;
+  return theilSenLine(
+    lower.map((point) => point.loadVolts),
+    lower.map((point) => point.outputAmps),
+  );
+}
+
+function withinToleranceOfLargest(points: readonly PreparedPoint[], product: ProductSpec): boolean {
+  const largest = points.reduce((most, point) => Math.max(most, point.outputAmps), 0);
+  return points.every((point) => point.outputAmps >= (1 - product.complianceTolerance) * largest);
+}
+
+function kneeIndex(points: readonly PreparedPoint[], seed: RobustLine, product: ProductSpec): number | null {
+  for (let i = 0; i < points.length; i++) {
+    if (!isOutside(points[i]!, seed, product)) continue;
+    const next = points[i + 1];
+    if (next === undefined || isOutside(next, seed, product)) return i;
+  }
+  return null;
+}
+
+function isOutside(point: PreparedPoint, seed: RobustLine, product: ProductSpec): boolean {
+  return (
+    point.outputAmps < NO_CURRENT_SHARE * product.nominalAmps ||
+    point.outputAmps < (1 - product.complianceTolerance) * seedCurrent(seed, point)
+  );
+}
+
+function seedCurrent(seed: RobustLine, point: PreparedPoint): number {
+  return seed.intercept + seed.slope * point.loadVolts;
+}
+
+function shortAt(
+  points: readonly PreparedPoint[],
+  knee: number,
+  seed: RobustLine,
+  product: ProductSpec,
+): ComplianceSearch {
+  const outside = points[knee]!;
+  const inside = points[knee - 1];
+  if (inside === undefined) {
+    const lowest = { kneeFound: true, complianceVolts: outside.loadVolts, bound: 'atMost' } as const;
+    return finding(lowest, -Infinity, product);
+  }
+  const crossing = crossingBetween(inside, outside, seed, product.complianceTolerance);
+  const isShort = crossing.volts < product.complianceHighVolts;
+  const fitLimitVolts = isShort
+    ? stepBelow(points, knee - 1, sameVoltageWithin(product))
+    : (inside.loadVolts + outside.loadVolts) / 2;
+  return finding({ kneeFound: true, complianceVolts: crossing.volts }, fitLimitVolts, product, crossing);
+}
+
+/** Where I/Î − 1 passes −τ on the straight line between two points. */
+function crossingBetween(
+  inside: PreparedPoint,
+  outside: PreparedPoint,
+  seed: RobustLine,
+  tolerance: number,
+): ToleranceCrossing {
+  const above = excess(inside, seed, tolerance);
+  const below = excess(outside, seed, tolerance);
+  const stepVolts = outside.loadVolts - inside.loadVolts;
+  const lost = above - below;
+  const share = lost > 0 ? Math.min(1, Math.max(0, above / lost)) : 1;
+  const expected = seedCurrent(seed, outside);
+  return {
+    volts: inside.loadVolts + share * stepVolts,
+    stepVolts,
+    voltsPerAmp: lost > 0 && expected > 0 ? stepVolts / lost / expected : 0,
+  };
+}
+
+/** I/Î − 1 + τ: what is left of the tolerance, as a fraction. */
+function excess(point: PreparedPoint, seed: RobustLine, tolerance: number): number {
+  const expected = seedCurrent(seed, point);
+  return expected > 0 ? point.outputAmps / expected - 1 + tolerance : 0;
+}
+
+/** Voltage of the load step below that of the given point; −∞ when there is none. */
+function stepBelow(points: readonly PreparedPoint[], index: number, toleranceVolts: number): number {
+  const volts = points[index]?.loadVolts ?? -Infinity;
+  for (let i = index - 1; i >= 0; i--) {
+    if (volts - points[i]!.loadVolts > toleranceVolts) return points[i]!.loadVolts;
+  }
+  return -Infinity;
+}
+
+function heldUpTo(highest: PreparedPoint, product: ProductSpec): ComplianceSearch {
+  return finding({ complianceVolts: highest.loadVolts, bound: 'atLeast' }, Infinity, product);
+}
+
+function untold(reason: string, product: ProductSpec): ComplianceSearch {
+  return finding({ reason }, Infinity, product);
+}
+
+function finding(
+  known: Partial<ComplianceFinding>,
+  fitLimitVolts: number,
+  { complianceLowVolts, complianceHighVolts }: ProductSpec,
+  crossing: ToleranceCrossing | null = null,
+): ComplianceSearch {
+  const fitHighVolts = Math.min(complianceHighVolts, Math.max(complianceLowVolts, fitLimitVolts));
+  const unknown = { kneeFound: false, complianceVolts: null, bound: 'exact', reason: null } as const;
+  return { finding: { ...unknown, fitHighVolts, ...known }, fitLimitVolts, crossing };
+}
