@@ -1,9 +1,10 @@
 import { Controller, Get, Query } from '@nestjs/common';
 import { ApiOperation, ApiTags } from '@nestjs/swagger';
 import { ApiProblems } from '../common/api-problems.decorator.js';
+import { readCursor, toPage } from '../common/cursor.js';
+import { PageQueryDto } from '../common/page-query.dto.js';
 import { AuditService } from './audit.service.js';
-import { AuditPageDto, toAuditPageDto } from './dto/audit-page.dto.js';
-import { AuditQueryDto } from './dto/audit-query.dto.js';
+import { AuditPageDto, toAuditEntryDto } from './dto/audit-page.dto.js';
 
 @ApiTags('Accounts')
 @Controller('audit')
@@ -12,8 +13,9 @@ export class AuditController {
 
   @Get()
   @ApiOperation({ summary: 'Read the audit trail, newest first' })
-  @ApiProblems(401, 403, 422)
-  async page(@Query() { cursor }: AuditQueryDto): Promise<AuditPageDto> {
-    return toAuditPageDto(await this.audit.page(cursor === undefined ? null : Number(cursor)));
+  @ApiProblems(422)
+  async page(@Query() { cursor, limit = 50 }: PageQueryDto): Promise<AuditPageDto> {
+    const entries = await this.audit.findPage(readCursor(cursor), limit);
+    return toPage(entries, limit, ({ auditEntryId }) => auditEntryId, toAuditEntryDto);
   }
 }

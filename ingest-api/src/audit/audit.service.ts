@@ -13,8 +13,6 @@ export interface Deed {
   detail: string | null;
 }
 
-const pageSize = 50;
-
 /** The trail of who did what; the database refuses to change or remove its rows. */
 @Injectable()
 export class AuditService {
@@ -25,14 +23,12 @@ export class AuditService {
     await AuditEntry.create({ ...deed, at: this.clock() }, { transaction });
   }
 
-  /** Newest first; `beforeId` is the last entry of the page before. */
-  async page(beforeId: number | null): Promise<{ entries: AuditEntry[]; nextBeforeId: number | null }> {
-    const found = await AuditEntry.findAll({
+  /** Newest first, from below `beforeId`; one entry more than the page holds says that there is a next one. */
+  findPage(beforeId: number | null, pageSize: number): Promise<AuditEntry[]> {
+    return AuditEntry.findAll({
       where: beforeId === null ? {} : { auditEntryId: { [Op.lt]: beforeId } },
       order: [['auditEntryId', 'DESC']],
       limit: pageSize + 1,
     });
-    const entries = found.slice(0, pageSize);
-    return { entries, nextBeforeId: found.length > pageSize ? entries.at(-1)!.auditEntryId : null };
   }
 }

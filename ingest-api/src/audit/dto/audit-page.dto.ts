@@ -35,16 +35,7 @@ export class AuditPageDto {
   nextCursor!: string | null;
 }
 
-export function toAuditPageDto(page: { entries: AuditEntry[]; nextBeforeId: number | null }): AuditPageDto {
-  return {
-    items: page.entries.map(({ auditEntryId, at, actor, action, subject, detail }) => ({
-      auditId: auditEntryId,
-      at: new Date(at).toISOString(),
-      actor,
-      action,
-      subject,
-      detail,
-    })),
-    nextCursor: page.nextBeforeId?.toString() ?? null,
-  };
+export function toAuditEntryDto(entry: AuditEntry): AuditEntryDto {
+  const { auditEntryId, at, actor, action, subject, detail } = entry;
+  return { auditId: auditEntryId, at: new Date(at).toISOString(), actor, action, subject, detail };
 }
