@@ -20,7 +20,7 @@ export function normalPdf(z: number): number {
   return Math.exp(-0.5 * z * z) / Math.sqrt(2 * Math.PI);
 }
 
-/** Below this the library's quantile holds fewer digits than its distribution function: one step of Newton mends it. */
+/** Below this the library's quantile holds fewer digits than its distribution function: two steps of Newton mend it. */
 const FAR_TAIL = 1e-3;
 
 /**
@@ -33,5 +33,9 @@ export function normalQuantile(probability: number): number {
   requireProbability(probability, 'normalQuantile');
   const rough = quantile(probability, 0, 1);
   if (probability === 0 || probability > FAR_TAIL) return rough;
-  return rough - (normalCdf(rough) - probability) / normalPdf(rough);
+  return newtonStep(newtonStep(rough, probability), probability);
+}
+
+function newtonStep(z: number, probability: number): number {
+  return z - (normalCdf(z) - probability) / normalPdf(z);
 }

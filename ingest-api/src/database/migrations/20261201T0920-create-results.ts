@@ -58,8 +58,10 @@ export const createResults: Migration = {
       `CREATE INDEX results_attempts ON results (unit_id, stage_id, started_at)`,
       `CREATE INDEX results_cohort ON results (started_at, stage_id, attempt, verdict) WHERE counted = 1`,
       `CREATE INDEX results_station ON results (station_id, result_id)`,
+      `CREATE INDEX results_station_received ON results (station_id, received_at)`,
       `CREATE INDEX results_stage ON results (stage_id, result_id)`,
       `CREATE INDEX results_lot ON results (lot_id, result_id)`,
+      `CREATE INDEX results_received ON results (received_at, result_id)`,
       `CREATE TABLE result_bodies (
         result_id INTEGER PRIMARY KEY REFERENCES results (result_id),
         canonical_sha256 TEXT NOT NULL,

@@ -1,0 +1,90 @@
+/** Every `code` of a problem document that a caller may meet, with what to do. */
+export const errorCatalogue: readonly { code: string; status: number; meaning: string; remedy: string }[] = [
+  {
+    code: 'malformed',
+    status: 400,
+    meaning: 'The body is not strict JSON, or not what its headers say.',
+    remedy: 'Mend the body; `errors` names the place. A name may stand once in an object.',
+  },
+  {
+    code: 'not_signed_in',
+    status: 401,
+    meaning: 'The page asks without a session, or the session has ended.',
+    remedy: 'Sign in.',
+  },
+  {
+    code: 'key_unknown',
+    status: 401,
+    meaning: 'No API key, or none that is known here.',
+    remedy: 'Send the whole key in X-API-Key.',
+  },
+  { code: 'key_revoked', status: 403, meaning: 'The API key was revoked.', remedy: 'Ask for a new key.' },
+  { code: 'key_expired', status: 403, meaning: 'The API key has expired.', remedy: 'Ask for a new key.' },
+  {
+    code: 'station_inactive',
+    status: 403,
+    meaning: "The key's station is out of service.",
+    remedy: 'Have the station put back into service.',
+  },
+  {
+    code: 'role_not_allowed',
+    status: 403,
+    meaning: 'Your role may not do this.',
+    remedy: 'Ask someone whose role may; Settings shows the table.',
+  },
+  {
+    code: 'origin_not_allowed',
+    status: 403,
+    meaning: 'A change was asked for from another site.',
+    remedy: "Use the dashboard's own address.",
+  },
+  { code: 'forbidden', status: 403, meaning: 'Not allowed.', remedy: 'See the detail.' },
+  {
+    code: 'not_found',
+    status: 404,
+    meaning: 'There is no such thing, or not for you.',
+    remedy: 'Check the address.',
+  },
+  {
+    code: 'result_id_used',
+    status: 409,
+    meaning: 'The resultId is taken by other content or another station.',
+    remedy: 'Give a new measurement a new UUID; resend the old one unchanged.',
+  },
+  {
+    code: 'station_exists',
+    status: 409,
+    meaning: 'A station of this name exists.',
+    remedy: 'Choose another name.',
+  },
+  {
+    code: 'too_large',
+    status: 413,
+    meaning: 'The body is too large.',
+    remedy: 'A post may have 1 MB, unpacked.',
+  },
+  {
+    code: 'unsupported_media_type',
+    status: 415,
+    meaning: 'The content type is not read here.',
+    remedy: 'Send application/json.',
+  },
+  {
+    code: 'invalid',
+    status: 422,
+    meaning: 'Readable, but against the contract.',
+    remedy: 'Mend every place in `errors`; the schema says what is wanted.',
+  },
+  {
+    code: 'too_many_requests',
+    status: 429,
+    meaning: 'More than the share of this key, account or address.',
+    remedy: 'Wait as Retry-After says.',
+  },
+  {
+    code: 'store_unavailable',
+    status: 503,
+    meaning: "It can't be stored now; nothing was stored.",
+    remedy: 'Keep it and send it again as Retry-After says.',
+  },
+];

@@ -1,0 +1,196 @@
+import type { Transaction } from 'sequelize';
+import { runStatement, selectRows } from '../database/sql.js';
+import type { AttemptOrder } from './attempts.js';
+import type { PreparedResult } from './prepared-result.js';
+import type { ResultAnswer } from './result.types.js';
+
+/*
+ * The statements by which a batch of results is stored: each takes the whole batch as one JSON parameter,
+ * so that their number doesn't grow with the batch.
+ */
+
+export interface ExistingResult {
+  resultUuid: string;
+  stationId: number;
+  canonicalSha256: string;
+  answer: string;
+}
+
+export function findExisting(transaction: Transaction, uuids: readonly string[]): Promise<ExistingResult[]> {
+  return selectRows(
+    transaction,
+    `SELECT r.result_uuid AS resultUuid, r.station_id AS stationId, b.canonical_sha256 AS canonicalSha256, r.answer
+     FROM results r JOIN result_bodies b USING (result_id)
+     WHERE r.result_uuid IN (SELECT value FROM json_each(?))`,
+    JSON.stringify(uuids),
+  );
+}
+
+export interface UnitPlace {
+  productId: number;
+  serialNumber: string;
+  unitId: number;
+  latestResultId: number | null;
+}
+
+/** Adds lots and units not seen before and gives the units' ids. */
+export async function placeUnits(
+  transaction: Transaction,
+  results: readonly PreparedResult[],
+): Promise<UnitPlace[]> {
+  const wanted = JSON.stringify(results.map((result) => [result.productId, result.serialNumber, result.lot]));
+  await runStatement(
+    transaction,
+    `INSERT INTO lots (product_id, name)
+     SELECT DISTINCT value ->> 0, value ->> 2 FROM json_each(?) WHERE value ->> 2 IS NOT NULL
+     ON CONFLICT DO NOTHING`,
+    wanted,
+  );
+  await runStatement(
+    transaction,
+    `INSERT INTO units (product_id, serial_number)
+     SELECT DISTINCT value ->> 0, value ->> 1 FROM json_each(?) WHERE true ON CONFLICT DO NOTHING`,
+    wanted,
+  );
+  return selectRows(
+    transaction,
+    `SELECT u.product_id AS productId, u.serial_number AS serialNumber, u.unit_id AS unitId, u.latest_result_id AS latestResultId
+     FROM (SELECT DISTINCT value ->> 0 AS product_id, value ->> 1 AS serial_number FROM json_each(?)) w
+     JOIN units u USING (product_id, serial_number)`,
+    wanted,
+  );
+}
+
+export interface LotPlace {
+  productId: number;
+  name: string;
+  lotId: number;
+  state: string;
+}
+
+export function findLots(transaction: Transaction, results: readonly PreparedResult[]): Promise<LotPlace[]> {
+  const wanted = results
+    .filter((result) => result.lot !== null)
+    .map((result) => [result.productId, result.lot]);
+  return selectRows(
+    transaction,
+    `SELECT DISTINCT l.product_id AS productId, l.name, l.lot_id AS lotId, l.state
+     FROM json_each(?) w JOIN lots l ON l.product_id = w.value ->> 0 AND l.name = w.value ->> 1`,
+    JSON.stringify(wanted),
+  );
+}
+
+export interface CountedRow extends AttemptOrder {
+  unitId: number;
+  stageId: number;
+  verdict: string;
+  attempt: number | null;
+}
+
+/** All counted results of these units, at every stage. */
+export function findCounted(transaction: Transaction, unitIds: readonly number[]): Promise<CountedRow[]> {
+  return selectRows(
+    transaction,
+    `SELECT unit_id AS unitId, stage_id AS stageId, result_uuid AS resultUuid, started_at AS startedAt,
+            finished_at AS finishedAt, verdict, attempt
+     FROM results WHERE counted = 1 AND unit_id IN (SELECT value FROM json_each(?))`,
+    JSON.stringify(unitIds),
+  );
+}
+
+export async function nextResultId(transaction: Transaction): Promise<number> {
+  const [row] = await selectRows<{ next: number }>(
+    transaction,
+    'SELECT coalesce(max(result_id), 0) + 1 AS next FROM results',
+  );
+  return row!.next;
+}
+
+export interface PlacedResult {
+  result: PreparedResult;
+  resultId: number;
+  unitId: number;
+  lotId: number | null;
+  attempt: number | null;
+  answer: ResultAnswer;
+}
+
+const resultColumns: readonly [column: string, value: (placed: PlacedResult) => unknown][] = [
+  ['result_id', (p) => p.resultId],
+  ['result_uuid', (p) => p.result.resultUuid],
+  ['station_id', (p) => p.result.stationId],
+  ['api_key_id', (p) => p.result.apiKeyId],
+  ['product_id', (p) => p.result.productId],
+  ['stage_id', (p) => p.result.stageId],
+  ['unit_id', (p) => p.unitId],
+  ['lot_id', (p) => p.lotId],
+  ['run_kind', (p) => p.result.runKind],
+  ['outcome', (p) => p.result.outcome],
+  ['counted', (p) => (p.result.counted ? 1 : 0)],
+  ['attempt', (p) => p.attempt],
+  ['verdict', (p) => p.result.verdict],
+  ['first_verdict', (p) => p.result.verdict],
+  ['started_at', (p) => p.result.startedAt],
+  ['finished_at', (p) => p.result.finishedAt],
+  ['sent_at', (p) => p.result.sentAt],
+  ['received_at', (p) => p.result.receivedAt],
+  ['seeded', (p) => (p.result.seeded ? 1 : 0)],
+  ['conductance_siemens', (p) => p.result.conductanceSiemens],
+  ['conductance_uncertainty', (p) => p.result.conductanceUncertainty],
+  ['limit_siemens', (p) => p.result.limitSiemens],
+  ['impedance_ohms', (p) => p.result.impedanceOhms],
+  ['impedance_bound', (p) => p.result.impedanceBound],
+  ['reference_amps', (p) => p.result.referenceAmps],
+  ['failed_measures', (p) => JSON.stringify(p.result.failedMeasures)],
+  ['flags', (p) => JSON.stringify(p.result.flags)],
+  ['judgement', (p) => JSON.stringify(p.result.judgement)],
+  ['answer', (p) => JSON.stringify(p.answer)],
+];
+
+const insertResultsSql = `INSERT INTO results (${resultColumns.map(([column]) => column).join(', ')})
+  SELECT ${resultColumns.map((_, index) => `value ->> ${index}`).join(', ')} FROM json_each(?)`;
+
+export async function insertResults(
+  transaction: Transaction,
+  placed: readonly PlacedResult[],
+): Promise<void> {
+  await runStatement(
+    transaction,
+    insertResultsSql,
+    JSON.stringify(placed.map((p) => resultColumns.map(([, value]) => value(p)))),
+  );
+  await runStatement(
+    transaction,
+    `INSERT INTO result_bodies (result_id, canonical_sha256, body)
+     SELECT value ->> 0, value ->> 1, unhex(value ->> 2) FROM json_each(?)`,
+    JSON.stringify(
+      placed.map(({ resultId, result }) => [resultId, result.canonicalSha256, result.body.toString('hex')]),
+    ),
+  );
+}
+
+/** A late result moves the others' numbers. */
+export async function renumberAttempts(
+  transaction: Transaction,
+  numbers: readonly [resultUuid: string, attempt: number][],
+): Promise<void> {
+  if (numbers.length === 0) return;
+  await runStatement(
+    transaction,
+    `UPDATE results SET attempt = n.attempt
+     FROM (SELECT value ->> 0 AS uuid, value ->> 1 AS attempt FROM json_each(?)) AS n WHERE result_uuid = n.uuid`,
+    JSON.stringify(numbers),
+  );
+}
+
+/** The unit's newest result by its own clock, and the lot that it came in last. */
+export async function updateUnits(transaction: Transaction, unitIds: readonly number[]): Promise<void> {
+  await runStatement(
+    transaction,
+    `UPDATE units SET (latest_result_id, lot_id) =
+       (SELECT r.result_id, coalesce(r.lot_id, units.lot_id) FROM results r
+        WHERE r.unit_id = units.unit_id ORDER BY r.started_at DESC, r.result_id DESC LIMIT 1)
+     WHERE unit_id IN (SELECT value FROM json_each(?))`,
+    JSON.stringify(unitIds),
+  );
+}

@@ -1,0 +1,15 @@
+import { Module } from '@nestjs/common';
+import { ProductsModule } from '../products/products.module.js';
+import { GoldenChecksService } from './golden-checks.service.js';
+import { StationActivityService } from './station-activity.service.js';
+import { StationRegister } from './station-register.service.js';
+import { StationsController } from './stations.controller.js';
+import { StationsService } from './stations.service.js';
+
+@Module({
+  imports: [ProductsModule],
+  controllers: [StationsController],
+  providers: [StationRegister, StationActivityService, GoldenChecksService, StationsService],
+  exports: [StationRegister, StationActivityService, GoldenChecksService],
+})
+export class StationsModule {}

@@ -1,0 +1,67 @@
+import { QueryTypes } from 'sequelize';
+import type { Sequelize } from 'sequelize-typescript';
+import type { Verdict } from '../analysis/analysis.types.js';
+
+export interface UnitFilter {
+  search?: string;
+  partNumber?: string;
+  lot?: string;
+  stage?: string;
+  station?: string;
+  verdict?: string;
+  /** Only units whose latest result is older than this row id. */
+  before?: number | null;
+}
+
+export interface UnitRow {
+  unitId: number;
+  serialNumber: string;
+  partNumber: string;
+  productId: number;
+  lot: string | null;
+  latestResultId: number;
+}
+
+/** LIKE pattern for "begins with", its own wildcards taken literally. */
+const prefixPattern = (text: string): string => `${text.replace(/[\\%_]/g, '\\$&')}%`;
+
+/** Units by their latest result, the newest first. */
+export function findUnits(sequelize: Sequelize, filter: UnitFilter, limit: number): Promise<UnitRow[]> {
+  const all: [string, unknown][] = [
+    [`u.serial_number LIKE $v ESCAPE '\\'`, filter.search ? prefixPattern(filter.search) : undefined],
+    ['p.part_number = $v', filter.partNumber],
+    ['l.name = $v', filter.lot],
+    ['s.name = $v', filter.stage],
+    ['t.name = $v', filter.station],
+    ['r.verdict = $v', filter.verdict],
+    ['u.latest_result_id < $v', filter.before ?? undefined],
+  ];
+  const conditions = all.filter(([, value]) => value !== undefined);
+  const where = conditions.map(([sql], index) => sql.replace('$v', `$${index + 1}`));
+  return sequelize.query<UnitRow>(
+    `SELECT u.unit_id AS unitId, u.serial_number AS serialNumber, p.part_number AS partNumber, p.product_id AS productId,
+       l.name AS lot, u.latest_result_id AS latestResultId
+     FROM units u JOIN products p USING (product_id) JOIN results r ON r.result_id = u.latest_result_id
+       JOIN stages s ON s.stage_id = r.stage_id JOIN stations t ON t.station_id = r.station_id
+       LEFT JOIN lots l ON l.lot_id = u.lot_id
+     ${where.length > 0 ? `WHERE ${where.join(' AND ')}` : ''}
+     ORDER BY u.latest_result_id DESC LIMIT $${conditions.length + 1}`,
+    { bind: [...conditions.map(([, value]) => value), limit], type: QueryTypes.SELECT },
+  );
+}
+
+export interface UnitStageRow {
+  unitId: number;
+  stageId: number;
+  attempts: number;
+  verdict: Verdict;
+}
+
+/** Attempts and latest verdict of each unit at each stage, counted results only. */
+export function findUnitStages(sequelize: Sequelize, unitIds: readonly number[]): Promise<UnitStageRow[]> {
+  return sequelize.query<UnitStageRow>(
+    `SELECT unit_id AS unitId, stage_id AS stageId, max(attempt) AS attempts, verdict
+     FROM results WHERE counted = 1 AND unit_id IN (SELECT value FROM json_each($1)) GROUP BY unit_id, stage_id`,
+    { bind: [JSON.stringify(unitIds)], type: QueryTypes.SELECT },
+  );
+}

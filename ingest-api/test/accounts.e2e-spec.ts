@@ -1,0 +1,202 @@
+import { getConnectionToken } from '@nestjs/sequelize';
+import type { Sequelize } from 'sequelize-typescript';
+import request from 'supertest';
+import { AuditService } from '../src/audit/audit.service.js';
+import { AuditEntry } from '../src/audit/models/audit-entry.model.js';
+import { Writer } from '../src/database/writer.js';
+import { FirstAdministrator, refuseDemoAccounts } from '../src/users/first-administrator.js';
+import { User } from '../src/users/models/user.model.js';
+import { addAccount, password, signIn } from './accounts.builder.js';
+import { createTestApp } from './scratch-app.js';
+
+const adminEmail = 'administrator@fernhollow.example';
+
+describe('accounts', () => {
+  let test: Awaited<ReturnType<typeof createTestApp>>;
+  let api: ReturnType<typeof request>;
+  let admin: Awaited<ReturnType<typeof signIn>>;
+  const server = () => test.app.getHttpServer();
+  const patch = (userId: number, wanted: object) =>
+    api.patch(`/api/v1/users/${userId}`).set(admin).send(wanted);
+  const newAccount = {
+    email: 'Tomasz.Reed@fernhollow.example',
+    displayName: 'Tomasz Reed',
+    role: 'integrator',
+    password,
+  };
+
+  beforeEach(async () => {
+    test = await createTestApp();
+    api = request(server());
+    await addAccount(test.app, { role: 'administrator', displayName: 'Ada Moss' });
+    admin = await signIn(server(), adminEmail);
+  });
+  afterEach(() => test.close());
+
+  it('are created by an administrator and can sign in', async () => {
+    const created = await api.post('/api/v1/users').set(admin).send(newAccount).expect(201);
+    expect(created.body).toEqual({
+      userId: expect.any(Number),
+      email: 'tomasz.reed@fernhollow.example',
+      displayName: 'Tomasz Reed',
+      role: 'integrator',
+      active: true,
+      createdAt: '2026-11-30T08:00:00.000Z',
+      lastSignInAt: null,
+    });
+    await signIn(server(), newAccount.email);
+    const list = await api.get('/api/v1/users').set(admin).expect(200);
+    expect(list.body.map((user: { displayName: string }) => user.displayName)).toEqual([
+      'Ada Moss',
+      'Tomasz Reed',
+    ]);
+  });
+
+  it.each([
+    ['an address that is none', { email: 'tomasz' }, '/email'],
+    ['a blank name', { displayName: ' ' }, '/displayName'],
+    ['an unknown role', { role: 'owner' }, '/role'],
+    ['a short password', { password: 'resistors' }, '/password'],
+    ['a password of which bcrypt would read only a part', { password: 'r'.repeat(73) }, '/password'],
+    ['a property that does not exist', { demo: true }, '/demo'],
+  ])('are not created with %s', async (_, wrong, pointer) => {
+    const refused = await api
+      .post('/api/v1/users')
+      .set(admin)
+      .send({ ...newAccount, ...wrong })
+      .expect(422);
+    expect(refused.body.errors).toEqual([expect.objectContaining({ pointer })]);
+    expect(await User.count()).toBe(1);
+  });
+
+  it('are not created twice for one address', async () => {
+    await api.post('/api/v1/users').set(admin).send(newAccount).expect(201);
+    const again = { ...newAccount, email: newAccount.email.toUpperCase() };
+    const refused = await api.post('/api/v1/users').set(admin).send(again).expect(409);
+    expect(refused.body.code).toBe('email_taken');
+  });
+
+  it('lose their sessions at once when disabled', async () => {
+    const { userId, email } = await addAccount(test.app);
+    const viewer = await signIn(server(), email);
+    await api.get('/api/v1/session').set(viewer).expect(200);
+    await patch(userId, { active: false }).expect(200);
+    await api.get('/api/v1/session').set(viewer).expect(401);
+    await patch(userId, { active: true }).expect(200);
+    await api.get('/api/v1/session').set(viewer).expect(401);
+  });
+
+  it('have the rights of a new role at once, in the sessions they have', async () => {
+    const { userId, email } = await addAccount(test.app);
+    const person = await signIn(server(), email);
+    await api.get('/api/v1/users').set(person).expect(403);
+    await patch(userId, { role: 'administrator' }).expect(200);
+    await api.get('/api/v1/users').set(person).expect(200);
+    await patch(userId, { role: 'viewer' }).expect(200);
+    const refused = await api.get('/api/v1/users').set(person).expect(403);
+    expect(refused.body).toMatchObject({
+      code: 'role_not_allowed',
+      detail: expect.stringContaining('administrator'),
+    });
+  });
+
+  it('lose their sessions when an administrator sets a new password', async () => {
+    const { userId, email } = await addAccount(test.app);
+    const viewer = await signIn(server(), email);
+    await patch(userId, { password: 'seven amber cascodes' }).expect(200);
+    await api.get('/api/v1/session').set(viewer).expect(401);
+    await signIn(server(), email, 'seven amber cascodes');
+  });
+
+  it('always keep one active administrator, even when two give up the role at the same time', async () => {
+    const { userId } = (await User.findOne({ where: { email: adminEmail } }))!;
+    const second = await addAccount(test.app, {
+      role: 'administrator',
+      email: 'second@fernhollow.example',
+    });
+    const answers = await Promise.all([
+      patch(userId, { role: 'viewer' }),
+      patch(second.userId, { active: false }),
+    ]);
+    expect(answers.map(({ status }) => status).sort()).toEqual([200, 409]);
+    expect(answers.find(({ status }) => status === 409)?.body.code).toBe('last_administrator');
+    expect(await User.count({ where: { role: 'administrator', active: true } })).toBe(1);
+  });
+
+  it('are not changed where there is none, or by what is no number', async () => {
+    await patch(4711, { active: false }).expect(404);
+    await api.patch('/api/v1/users/first').set(admin).send({ active: false }).expect(400);
+    await patch(1, { role: null }).expect(422);
+  });
+
+  it('leave a trail of who did what, newest first, page by page', async () => {
+    const { userId } = await addAccount(test.app);
+    await patch(userId, { role: 'qualityLead', displayName: 'Rosalind Hart-Moss' }).expect(200);
+    await patch(userId, {}).expect(200);
+    const first = await api.get('/api/v1/audit').set(admin).expect(200);
+    expect(first.body.items[0]).toEqual({
+      auditId: expect.any(Number),
+      at: '2026-11-30T08:00:00.000Z',
+      actor: adminEmail,
+      action: 'account.changed',
+      subject: 'viewer@fernhollow.example',
+      detail: 'name Rosalind Hart → Rosalind Hart-Moss, role viewer → qualityLead',
+    });
+    expect(first.body.items[1].action).toBe('session.started');
+
+    const deed = { actor: 'system', action: 'backup.made', subject: 'site', detail: null };
+    await test.app.get(Writer).run(async (transaction) => {
+      for (let i = 0; i < 100; i += 1) await test.app.get(AuditService).record(transaction, deed);
+    });
+    const ids: number[] = [];
+    let cursor: string | null = '';
+    while (cursor !== null) {
+      const page = await api
+        .get(`/api/v1/audit${cursor && `?cursor=${cursor}`}`)
+        .set(admin)
+        .expect(200);
+      ids.push(...page.body.items.map((entry: { auditId: number }) => entry.auditId));
+      cursor = page.body.nextCursor as string | null;
+    }
+    expect(ids).toEqual(Array.from({ length: 102 }, (_, i) => 102 - i));
+    await api.get('/api/v1/audit?cursor=1%20OR%201').set(admin).expect(422);
+  });
+
+  it('leave a trail that nobody can change or remove', async () => {
+    const sequelize: Sequelize = test.app.get(getConnectionToken());
+    const before = await AuditEntry.findAll({ raw: true });
+    expect(before).toHaveLength(1);
+    for (const sql of ["UPDATE audit_entries SET actor = 'nobody'", 'DELETE FROM audit_entries']) {
+      await expect(sequelize.query(sql)).rejects.toMatchObject({
+        parent: { message: expect.stringContaining('append-only') },
+      });
+    }
+    expect(await AuditEntry.findAll({ raw: true })).toEqual(before);
+  });
+
+  it('of the demo keep real use from starting', async () => {
+    const serve = { ...test.env, mode: 'serve' as const };
+    await expect(refuseDemoAccounts(serve)).resolves.toBeUndefined();
+    await addAccount(test.app, { demo: true, active: false });
+    await expect(refuseDemoAccounts(serve)).rejects.toThrow(/demo accounts/);
+    await expect(refuseDemoAccounts(test.env)).resolves.toBeUndefined();
+  });
+});
+
+describe('the first administrator', () => {
+  it('is made once from the settings, when there is no account at all', async () => {
+    const test = await createTestApp({
+      AMPKEEP_ADMIN_EMAIL: 'Ada@fernhollow.example',
+      AMPKEEP_ADMIN_PASSWORD: password,
+    });
+    await test.app.get(FirstAdministrator).createOnce();
+    await test.app.get(FirstAdministrator).createOnce();
+    const api = request(test.app.getHttpServer());
+    const admin = await signIn(test.app.getHttpServer(), 'ada@fernhollow.example');
+    const list = await api.get('/api/v1/users').set(admin).expect(200);
+    expect(list.body).toEqual([
+      expect.objectContaining({ email: 'ada@fernhollow.example', role: 'administrator' }),
+    ]);
+    await test.close();
+  });
+});

@@ -1,0 +1,123 @@
+import { randomUUID } from 'node:crypto';
+import type { INestApplicationContext } from '@nestjs/common';
+import type { Transaction } from 'sequelize';
+import type { MeasureJudgement, MeasureName } from '../src/analysis/analysis.types.js';
+import { BreachRecorder, type FailedResult, type RecordedBreach } from '../src/breaches/breach-recorder.js';
+import { Writer } from '../src/database/writer.js';
+import { Product } from '../src/products/models/product.model.js';
+import { Stage } from '../src/products/models/stage.model.js';
+import { Result } from '../src/results/models/result.model.js';
+import { Unit } from '../src/results/models/unit.model.js';
+import { Station } from '../src/stations/models/station.model.js';
+
+const partNumber = 'FH-R500-W';
+const createdAt = Date.parse('2026-11-01T08:00:00Z');
+
+const aProduct = {
+  partNumber,
+  description: '500 µA source, Wilson mirror',
+  nominalAmps: 500e-6,
+  supplyVolts: 9,
+  complianceLowVolts: 0,
+  complianceHighVolts: 8,
+  complianceTolerance: 0.01,
+  direction: 'source',
+  circuitKind: 'wilsonMirror',
+  hasEmitterResistors: false,
+  createdAt,
+};
+
+export interface FailWish {
+  serialNumber: string;
+  stageId: number;
+  receivedAt: number;
+  startedAt: number;
+  seeded: boolean;
+  failedMeasures: MeasureName[];
+}
+
+export const aJudgement = (name: MeasureName): MeasureJudgement => ({
+  name,
+  unit: 'Ω',
+  value: 3.1e6,
+  expandedUncertainty: 1e5,
+  low: 3e6,
+  high: 3.2e6,
+  bound: 'exact',
+  reason: null,
+  limit: { measure: name, lower: 5e6, upper: null, rule: 'guarded', guardFactor: 1 },
+  outcome: 'fail',
+  probabilityOfConformity: 0,
+});
+
+/** One product with the stages `board` (1) and `final` (2), and the station `north-1`. */
+export async function addLine(app: INestApplicationContext): Promise<void> {
+  await app.get(Writer).run(async (transaction) => {
+    const { productId } = await Product.create(aProduct, { transaction });
+    for (const [index, name] of ['board', 'final'].entries()) {
+      const position = index + 1;
+      await Stage.create({ stageId: position, productId, name, position, maxAttempts: 3 }, { transaction });
+    }
+    await Station.create({ name: 'north-1', line: 'north', active: true, createdAt }, { transaction });
+  });
+}
+
+const aFail: Omit<FailWish, 'receivedAt' | 'startedAt'> = {
+  serialNumber: 'W26480417',
+  stageId: 2,
+  seeded: false,
+  failedMeasures: ['outputImpedance'],
+};
+
+/** Stores failing results received `now` in one transaction with their breaches, as intake does. */
+export async function storeFails(
+  app: INestApplicationContext,
+  now: number,
+  wishes: readonly Partial<FailWish>[],
+): Promise<RecordedBreach[]> {
+  const recorder = app.get(BreachRecorder, { strict: false });
+  const recorded = await app.get(Writer).run(async (transaction) => {
+    const fails: FailedResult[] = [];
+    for (const wish of wishes) {
+      fails.push(
+        await storeResult(transaction, { ...aFail, receivedAt: now, startedAt: now - 12_000, ...wish }),
+      );
+    }
+    return recorder.record(transaction, fails);
+  });
+  recorder.afterCommit(recorded);
+  return recorded;
+}
+
+async function storeResult(transaction: Transaction, wish: FailWish): Promise<FailedResult> {
+  const { serialNumber, ...fields } = wish;
+  const known = await Unit.findOne({ where: { serialNumber }, transaction });
+  const { unitId } = known ?? (await Unit.create({ productId: 1, serialNumber }, { transaction }));
+  const judgement = wish.failedMeasures.map(aJudgement);
+  const resultUuid = randomUUID();
+  const { resultId } = await Result.create(
+    { ...aResultRow, ...fields, resultUuid, unitId, judgement },
+    { transaction },
+  );
+  const stage = wish.stageId === 1 ? 'board' : 'final';
+  return { ...wish, resultId, resultUuid, judgement, partNumber, stage };
+}
+
+const aResultRow = {
+  stationId: 1,
+  productId: 1,
+  runKind: 'production',
+  outcome: 'completed',
+  counted: true,
+  attempt: 1,
+  verdict: 'fail',
+  firstVerdict: 'fail',
+  conductanceSiemens: 322e-9,
+  conductanceUncertainty: 1e-8,
+  limitSiemens: 2e-7,
+  impedanceOhms: 3.1e6,
+  impedanceBound: 'exact',
+  referenceAmps: 5e-4,
+  flags: [],
+  answer: {},
+};
