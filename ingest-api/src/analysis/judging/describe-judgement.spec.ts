@@ -64,8 +64,8 @@ describe('the judging in words', () => {
       }),
     ],
     [
-      'Compliance voltage is at least 8 V; at least 8 V is required, so it fails: no point reaches half of the nominal current.',
-      judged(aComplianceMeasure({ reason: 'deadOutput' }), {
+      'Compliance voltage is at most 0 V; at least 8 V is required, so it fails: no point carries a tenth of the nominal current.',
+      judged(aComplianceMeasure({ value: 0, bound: 'atMost', reason: 'noCurrent' }), {
         limit: aLimit({ measure: 'complianceVoltage', lower: 8 }),
         outcome: 'fail',
       }),

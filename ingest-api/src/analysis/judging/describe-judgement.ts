@@ -9,9 +9,12 @@ const NEARLY_IMPOSSIBLE = 0.001;
 /** What the reasons say in words; an unknown reason is quoted as it stands. */
 const REASONS: ReadonlyMap<string, string> = new Map([
   ['notMeasured', 'it was not measured'],
+  ['notComputed', 'it could not be computed'],
+  ['notApplicable', 'it does not apply to this circuit'],
+  ['fewPoints', 'too few points to tell'],
+  ['noCurrent', 'no point carries a tenth of the nominal current'],
   ['rangeNotCovered', 'the points do not cover the promised range'],
   ['uncertaintyUnknown', 'its uncertainty is not known'],
-  ['deadOutput', 'no point reaches half of the nominal current'],
   ['risingCurrent', 'the current rises with the load voltage'],
 ]);
 
@@ -59,7 +62,7 @@ function describeOutcome({ outcome, reason, value, probabilityOfConformity }: Me
   const probability = describeProbability(probabilityOfConformity);
   if (outcome === 'pass') return `so it passes${probability}`;
   if (outcome === 'fail') {
-    const because = reason === 'deadOutput' ? `: ${inWords(reason)}` : '';
+    const because = reason === 'noCurrent' ? `: ${inWords(reason)}` : '';
     return `so it fails${because}${probability}`;
   }
   if (value === null) return 'so it is not proven';
@@ -75,9 +78,8 @@ function describeProbability(probability: number | null): string {
   return ` (probability of conformity ${Number((100 * probability).toPrecision(3))} %)`;
 }
 
+/** `notComputed: fewer than 3 voltages` → `fewer than 3 voltages`. */
 function inWords(reason: string): string {
-  const known = REASONS.get(reason);
-  if (known !== undefined) return known;
-  const detail = reason.split(': ')[1];
-  return detail ?? reason;
+  const detail = reason.split(': ').at(-1) ?? reason;
+  return REASONS.get(detail) ?? detail;
 }

@@ -8,7 +8,6 @@ import type {
 } from '../analysis.types.js';
 import { decideConformity } from './decide-conformity.js';
 import { judgedQuantity } from './judged-quantity.js';
-import { isDead } from './dead-output.js';
 import { IMPEDANCE_MEASURES } from './measure-names.js';
 
 /** U must not exceed this share of the tolerance for the `simple` rule to stay simple. */
@@ -27,10 +26,10 @@ type Decision = Pick<MeasureJudgement, 'outcome' | 'probabilityOfConformity' | '
  * (`notMeasured`, `uncertaintyUnknown`, or the reason the analysis gave); otherwise the limit's rule decides.
  * A decision left open by the guard band has the reason `guardBand`.
  *
- * The compliance voltage has two rules of its own. An output that is dead keeps its current up to no voltage at
- * all: fail, `deadOutput`. And without a point outside the tolerance only "at least the highest tested" is known:
- * that passes when the highest tested reaches the limit, or when the limit is no higher than the promised range
- * and the sweep counts as covering it (95 %); else it is `notProven`, never a fail.
+ * The compliance voltage has a rule of its own: without a point outside the tolerance only "at least the highest
+ * tested" is known. That passes when the highest tested reaches the limit, or when the limit is no higher than the
+ * promised range and the sweep counts as covering it (95 %); else it is `notProven`, never a fail. An output
+ * without current holds it up to no voltage, so it fails (`noCurrent`), however flat its characteristic is.
  *
  * @see ISO 14253-1 (guarded); JCGM 106:2012, clause 8 (decision rules)
  */
@@ -69,7 +68,7 @@ function decide(measure: Measure, limit: Limit, analysis: SweepAnalysis, product
   return {
     outcome,
     probabilityOfConformity: quantity.probabilityOfConformity,
-    reason: outcome === 'notProven' ? 'guardBand' : measure.reason,
+    reason: outcome === 'notProven' ? 'guardBand' : reasonBehind(measure, analysis),
   };
 }
 
@@ -80,9 +79,6 @@ function decideCompliance(
   analysis: SweepAnalysis,
   product: ProductSpec,
 ): Decision | null {
-  if (isDead(analysis, product)) {
-    return { outcome: 'fail', probabilityOfConformity: null, reason: 'deadOutput' };
-  }
   if (measure.value === null || measure.bound !== 'atLeast') return null;
   // The true value may lie anywhere above what was tested, so an upper limit stays open.
   if (limit.upper !== null) return open('guardBand');
@@ -92,6 +88,11 @@ function decideCompliance(
     return { outcome: 'pass', probabilityOfConformity: null, reason: measure.reason };
   }
   return open('rangeNotCovered');
+}
+
+/** A compliance voltage can fail for want of any current: that is worth saying beside the figure. */
+function reasonBehind(measure: Measure, analysis: SweepAnalysis): string | null {
+  return measure.name === 'complianceVoltage' ? analysis.compliance.reason : measure.reason;
 }
 
 function open(reason: string): Decision {

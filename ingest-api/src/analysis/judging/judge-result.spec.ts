@@ -9,7 +9,10 @@ import {
   anImpedanceMeasure,
   aProduct,
 } from './analysis.builder.js';
+import { describeJudgement } from './describe-judgement.js';
 import { judgeResult } from './judge-result.js';
+import { analyseSweep } from '../sweep/analyse-sweep.js';
+import { aSweep, pointsOf, steps } from '../sweep/sweep.builder.js';
 
 const judge = (
   analysis: SweepAnalysis,
@@ -154,10 +157,16 @@ describe('other measures, judged as they stand', () => {
     ['at most 0.04, limit 0.05', { value: 0.04, bound: 'atMost' }, { lower: null, upper: 0.05 }, 'pass'],
     ['at most 0.04, limit 0.03', { value: 0.04, bound: 'atMost' }, { lower: null, upper: 0.03 }, 'notProven'],
     [
-      'at most 0.04, its uncertainty unstated, limit 0.05',
+      'at most 0.04, its uncertainty unstated',
       { value: 0.04, bound: 'atMost', expandedUncertainty: null },
       { lower: null, upper: 0.05 },
-      'pass',
+      'notProven',
+    ],
+    [
+      'at most 0.04 drawn from an estimate of 0.035',
+      { value: 0.04, estimate: 0.035, bound: 'atMost' },
+      { lower: null, upper: 0.05 },
+      'notProven',
     ],
     [
       'no value',
@@ -341,13 +350,57 @@ describe('compliance voltage, limited whether or not anyone released a limit for
     expect(judge(anAnalysis({ measures: [measure], ...overrides }), limits).verdict).toBe(verdict);
   });
 
-  it('fails a dead output although its characteristic is flat', () => {
-    const good = anAnalysis();
-    const dead = { ...good, points: good.points.map((point) => ({ ...point, outputAmps: 2e-9 })) };
-    const { verdict, failedMeasures, measures } = judge(dead, [aLimit()]);
+  it('fails an output without current although its characteristic is flat', () => {
+    const analysis = analyseSweep(aSweep({ points: pointsOf(steps(0, 8, 9), () => 2e-9) }));
+    const { verdict, failedMeasures, measures } = judge(analysis, [aLimit()]);
     expect(verdict).toBe('fail');
     expect(failedMeasures).toEqual(['complianceVoltage']);
-    expect(of(measures, 'complianceVoltage').reason).toBe('deadOutput');
+    expect(of(measures, 'complianceVoltage').reason).toBe('noCurrent');
+  });
+});
+
+describe('whole sweeps', () => {
+  const limits = [aLimit(), aLimit({ measure: 'setpointError', lower: -1, upper: 1 })];
+
+  it('passes the example of the station contract', () => {
+    const { verdict, measures } = judge(analyseSweep(aSweep()), limits);
+    expect(verdict).toBe('pass');
+    expect(describeJudgement(of(measures, 'outputImpedance'))).toBe(
+      'Output impedance is 12.14 MΩ (11.85 to 12.44 MΩ); at least 10 MΩ is required, so it passes (probability of conformity over 99.9 %).',
+    );
+  });
+
+  it('judges a rising current by the size of its slope and says so', () => {
+    const rising = analyseSweep(
+      aSweep({ points: pointsOf(steps(0, 8, 9), (volts) => 500e-6 + 1e-6 * volts) }),
+    );
+    const { measures, failedMeasures } = judge(rising, limits);
+    expect(failedMeasures).toEqual(['outputImpedance']);
+    expect(describeJudgement(of(measures, 'outputImpedance'))).toBe(
+      'Output impedance has no value: the current rises with the load voltage; at least 10 MΩ is required, so it fails (probability of conformity below 0.1 %).',
+    );
+  });
+
+  it('leaves a limit on a measure that does not apply to the circuit unproven', () => {
+    const limit = aLimit({ measure: 'effectiveEarlyVoltage', lower: 50 });
+    expect(of(judge(analyseSweep(aSweep()), [limit]).measures, 'effectiveEarlyVoltage')).toMatchObject({
+      outcome: 'notProven',
+      reason: 'notApplicable',
+    });
+  });
+
+  it('never gives a better source a worse verdict, as long as the same meter measures it', () => {
+    const rank: Record<Verdict, number> = { fail: 0, notProven: 1, pass: 2, unjudged: -1, aborted: -1 };
+    const verdictAt = (slope: number) => {
+      const sweep = aSweep({ points: pointsOf(steps(0, 8, 9), (volts) => 500e-6 - slope * volts) });
+      return rank[judge(analyseSweep(sweep), [aLimit()]).verdict];
+    };
+    const slope = fc.double({ min: 0, max: 400e-9, noNaN: true });
+    fc.assert(
+      fc.property(slope, fc.double({ min: 0, max: 1, noNaN: true }), (worse, share) => {
+        expect(verdictAt(worse * share)).toBeGreaterThanOrEqual(verdictAt(worse));
+      }),
+    );
   });
 });
 

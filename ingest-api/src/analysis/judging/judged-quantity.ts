@@ -28,7 +28,7 @@ const COVERAGE_FACTOR = 2;
  * so what is displayed as "at least R" passes a guarded limit R.) For `a·r_out` and `a·r_out − supply` the limit L
  * means G = a/L and G = a/(L + supply); the uncertainty of a, parts per million, is left out.
  *
- * Every other measure is judged as it stands; of an "at most" figure, the estimate behind the bound.
+ * Every other measure is judged as it stands; of a bound, the estimate behind it.
  *
  * @returns null when the measure has no value to compare, or no uncertainty
  */
@@ -52,14 +52,14 @@ export function judgedQuantity(
   };
 }
 
-/** An `atMost` figure is an estimate near zero plus its U; without U the bound itself is all that is known. */
-function estimateOf({ value, expandedUncertainty, bound }: Measure): Estimate | null {
+/** Behind a bound stands the estimate it was drawn from; without U the bound itself is all that is known. */
+function estimateOf({ value, estimate, expandedUncertainty, bound }: Measure): Estimate | null {
   if (value === null) return null;
-  if (bound === 'atMost') {
-    const uncertainty = expandedUncertainty ?? value;
-    return { value: Math.max(0, value - uncertainty), expandedUncertainty: uncertainty };
+  if (bound === 'exact' || expandedUncertainty === null) {
+    return expandedUncertainty === null ? null : { value, expandedUncertainty };
   }
-  return expandedUncertainty === null ? null : { value, expandedUncertainty };
+  const behind = bound === 'atMost' ? value - expandedUncertainty : value + expandedUncertainty;
+  return { value: estimate ?? behind, expandedUncertainty };
 }
 
 function inConductance(
@@ -69,7 +69,9 @@ function inConductance(
   product: ProductSpec,
 ): JudgedQuantity | null {
   const factor = conductanceFactor(measure.name, analysis);
-  if (analysis.impedance === null || factor === null) return null;
+  // A significantly rising current has no impedance to show, but a slope to judge.
+  const absent = measure.value === null && measure.reason !== 'risingCurrent';
+  if (absent || analysis.impedance === null || factor === null) return null;
   const { conductanceSiemens, expandedUncertaintySiemens } = analysis.impedance;
   const offset = measure.name === 'effectiveEarlyVoltage' ? product.supplyVolts : 0;
   const tolerance = {
