@@ -13,19 +13,19 @@ export function SignInLayout({ children }: { children: ReactNode }) {
   return (
     <div className={styles.layout}>
       <div className={styles.drawing} aria-hidden>
-        <svg className={styles.lines} viewBox="0 0 600 400" preserveAspectRatio="xMinYMid slice">
-          <path className={styles.level} d="M60 130 H620" />
-          <path className={styles.limit} d="M60 130 L620 334" />
-          <path className={styles.unit} d="M60 130 L620 214" />
-          <circle cx="60" cy="130" r="7" />
-          <text x="330" y="120">
+        <svg className={styles.lines} viewBox="0 0 1000 800" preserveAspectRatio="xMinYMid slice">
+          <path className={styles.level} d="M80 260 H1400" />
+          <path className={styles.limit} d="M80 260 L1400 740" />
+          <path className={styles.unit} d="M80 260 L1400 457" />
+          <circle cx="80" cy="260" r="8" />
+          <text x="440" y="250">
             ideal source
           </text>
-          <text x="330" y="160" transform="rotate(8.5 330 160)">
-            unit
+          <text x="440" y="304" transform="rotate(8.5 440 304)">
+            a unit
           </text>
-          <text x="330" y="222" transform="rotate(20 330 222)">
-            limit
+          <text x="440" y="381" transform="rotate(20 440 381)">
+            its limit
           </text>
         </svg>
       </div>

@@ -10,6 +10,8 @@ export interface DataColumn<Row> {
   isRowHead?: boolean;
   /** Takes no more room than it needs. */
   isTight?: boolean;
+  /** Needs no head beside it where a phone stacks the row: a mark, a name, a clock time. */
+  isSelfExplaining?: boolean;
 }
 
 export interface DataTableProps<Row> {
@@ -18,7 +20,7 @@ export interface DataTableProps<Row> {
   columns: DataColumn<Row>[];
   rows: Row[];
   rowKey: (row: Row) => string;
-  /** On phones: `stack` turns each row into a block with its heads beside the cells, `scroll` moves sideways. */
+  /** On phones: `stack` lets the cells of a row flow behind its name, each with its head, `scroll` moves sideways. */
   narrow?: 'stack' | 'scroll';
   /** Marks one row as the chosen one. */
   currentKey?: string | null;
@@ -62,7 +64,7 @@ export function DataTable<Row>({
 }
 
 function Cell<Row>({ column, row }: { column: DataColumn<Row>; row: Row }) {
-  const label = typeof column.head === 'string' ? column.head : undefined;
+  const label = typeof column.head === 'string' && !column.isSelfExplaining ? column.head : undefined;
   return column.isRowHead ? (
     <th scope="row" className={cellClass(column)}>
       {column.cell(row)}

@@ -1,0 +1,28 @@
+import { Link } from 'react-router-dom';
+import { paths } from '@/config/paths';
+import type { TodayChange } from '@/types/api';
+import styles from './worse-list.module.css';
+
+function unitsBehind({ kind, partNumber, stage, station }: TodayChange): string {
+  const query: Record<string, string> = kind === 'silent' ? {} : { partNumber, stage };
+  if (station !== null) query.station = station;
+  if (kind === 'notProven') query.verdict = 'notProven';
+  return paths.units(query);
+}
+
+/** What is getting worse, a sentence each, with the way to the units behind it. */
+export function WorseList({ changes }: { changes: TodayChange[] }) {
+  if (changes.length === 0) return <p className={styles.none}>Nothing is getting worse.</p>;
+  return (
+    <ul>
+      {changes.map((change) => (
+        <li
+          key={`${change.kind} ${change.partNumber} ${change.stage} ${change.station}`}
+          className={styles.change}
+        >
+          {change.text} <Link to={unitsBehind(change)}>See the units</Link>
+        </li>
+      ))}
+    </ul>
+  );
+}
