@@ -31,7 +31,7 @@ export class AccessGuard implements CanActivate {
     const request = context.switchToHttp().getRequest<AmpkeepRequest>();
     const access = accessOf(request);
     if (access === undefined) {
-      throw new ForbiddenError('no_rights_entry', 'Nobody may use this route: the table of rights lacks it.');
+      throw new ForbiddenError('forbidden', 'Nobody may use this route: the table of rights lacks it.');
     }
     if (access.station && (!access.roles || request.headers['x-api-key'] !== undefined)) {
       return (await this.stationKey.canActivate(context)) as boolean;

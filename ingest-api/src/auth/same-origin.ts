@@ -7,7 +7,7 @@ const readOnlyMethods = new Set(['GET', 'HEAD', 'OPTIONS']);
  * Refuses a change that a page of another site asked a person's browser for. Browsers say where a request
  * comes from in `Origin`, or in `Sec-Fetch-Site`; one of them must name this site.
  * Hosts are compared, not protocols: behind a proxy that ends TLS the server itself sees plain HTTP.
- * @throws ForbiddenError `foreign_origin`
+ * @throws ForbiddenError `origin_not_allowed`
  */
 export function requireSameOrigin(request: Request, publicUrl: string): void {
   if (readOnlyMethods.has(request.method)) return;
@@ -19,7 +19,7 @@ export function requireSameOrigin(request: Request, publicUrl: string): void {
       : URL.canParse(origin) && ownHosts.includes(new URL(origin).host);
   if (same) return;
   throw new ForbiddenError(
-    'foreign_origin',
+    'origin_not_allowed',
     `Changes are taken only from pages of ${publicUrl}. A program sends the header "Origin: ${publicUrl}".`,
   );
 }

@@ -6,20 +6,19 @@ export type AccessKind = (typeof accessKinds)[number];
 
 /** One row of the table of rights. */
 export class RightDto {
-  /** @example "PATCH" */
+  /** @example "POST" */
   method!: string;
 
-  /** @example "/api/v1/users/{userId}" */
+  /** @example "/api/v1/users" */
   path!: string;
 
-  /** @example "Change an account's name, role or password, disable or enable it" */
+  /** @example "Create an account" */
   summary!: string;
 
-  /** `station`: with an API key, and by the people of `roles`, if any. */
+  /** Who may use it; `roles` names the people. `station`: with an API key, besides people, if any. */
   @ApiProperty({ enum: accessKinds, example: 'roles' })
   access!: AccessKind;
 
-  /** The roles of people who may use it. */
   @ApiProperty({ enum: roles, enumName: 'Role', isArray: true, example: ['administrator'] })
   roles!: Role[];
 }
