@@ -45,7 +45,7 @@ describe('a steady plan', () => {
   it('names units and lots by the week they were made in', () => {
     const wilson = planOf(42, 50).find((test) => test.unit.partNumber === 'FH-R500-W');
     expect(wilson?.unit.serialNumber).toMatch(/^W2648\d+$/);
-    expect(wilson?.unit.lot).toBe('L2648-2');
+    expect(wilson?.unit.lot).toBe('L2648-52');
   });
 });
 

@@ -35,6 +35,9 @@ export interface PlannedTest {
 /** One test in so many is a golden run. */
 const GOLDEN_SHARE = 1 / 30;
 
+/** Simulated lots are numbered from here, apart from those of seeded histories. */
+const FIRST_LOT = 51;
+
 /** More Wilson mirrors are made than anything else. */
 const productMix: readonly [string, ...string[]] = [
   'FH-R500-W',
@@ -89,7 +92,7 @@ function newUnit(
 ): Unit {
   const identity = {
     serialNumber: serialNumber(product, options.madeAt, running),
-    lot: lotName(options.madeAt, 1 + products.indexOf(product)),
+    lot: lotName(options.madeAt, FIRST_LOT + products.indexOf(product)),
   };
   return drawUnit(product, identity, random.fork(`unit ${running}`), drawOptions);
 }

@@ -1,3 +1,5 @@
+import createClient from 'openapi-fetch';
+import type { paths } from '../types/api.generated.js';
 import type { ResultAnswer } from '../types/result-answer.js';
 import type { ResultPost } from '../types/result-post.js';
 import { readRetryAfterMs } from './retry-delay.js';
@@ -23,6 +25,7 @@ const finalStatuses = new Set([400, 409, 413, 415, 422]);
 const blockingStatuses = new Set([401, 403, 404, 405]);
 
 export function httpPoster(url: string, now: () => Date): PostResult {
+  const client = createClient<paths>({ baseUrl: url });
   return async (apiKey, post, signal) => {
     // AbortSignal.any would hold on to every post for as long as the run's own signal lives.
     const abort = new AbortController();
@@ -30,13 +33,13 @@ export function httpPoster(url: string, now: () => Date): PostResult {
     const timer = setTimeout(cancel, TIMEOUT_MS);
     signal.addEventListener('abort', cancel, { once: true });
     try {
-      const response = await fetch(`${url}/api/v1/results`, {
-        method: 'POST',
-        headers: { 'content-type': 'application/json', 'x-api-key': apiKey },
-        body: JSON.stringify(post),
+      const { data, error, response } = await client.POST('/api/v1/results', {
+        body: post,
+        headers: { 'x-api-key': apiKey },
         signal: abort.signal,
       });
-      return classify(response, await response.text(), now());
+      if (data) return { kind: 'accepted', answer: data };
+      return classify(response, error, now());
     } catch (error) {
       return { kind: 'tryAgain', reason: networkReason(error), retryAfterMs: null };
     } finally {
@@ -46,16 +49,9 @@ export function httpPoster(url: string, now: () => Date): PostResult {
   };
 }
 
-function classify(response: Response, body: string, now: Date): Attempt {
+function classify(response: Response, problem: unknown, now: Date): Attempt {
   const { status } = response;
-  if (response.ok) {
-    const answer = parseObject(body);
-    if (answer && 'disposition' in answer)
-      return { kind: 'accepted', answer: answer as unknown as ResultAnswer };
-    return { kind: 'tryAgain', reason: `${status}, but not in the words of the hub`, retryAfterMs: null };
-  }
-  const detail = parseObject(body)?.detail;
-  const reason = `${status} ${typeof detail === 'string' ? detail : response.statusText}`;
+  const reason = `${status} ${detailOf(problem) ?? response.statusText}`;
   if (finalStatuses.has(status)) return { kind: 'refused', status, reason };
   if (blockingStatuses.has(status)) return { kind: 'blocked', status, reason };
   return {
@@ -65,13 +61,10 @@ function classify(response: Response, body: string, now: Date): Attempt {
   };
 }
 
-function parseObject(body: string): Record<string, unknown> | null {
-  try {
-    const parsed: unknown = JSON.parse(body);
-    return typeof parsed === 'object' && parsed !== null ? (parsed as Record<string, unknown>) : null;
-  } catch {
-    return null;
-  }
+/** What another server than the hub answers is no problem document. */
+function detailOf(problem: unknown): string | null {
+  const hasDetail = typeof problem === 'object' && problem !== null && 'detail' in problem;
+  return hasDetail && typeof problem.detail === 'string' ? problem.detail : null;
 }
 
 function networkReason(error: unknown): string {

@@ -1,6 +1,7 @@
+import type { components } from './api.generated.js';
+
 /** What a station needs of the answer to its post. */
-export interface ResultAnswer {
-  resultId: string;
-  verdict: 'pass' | 'fail' | 'notProven' | 'unjudged' | 'aborted';
-  disposition: 'next' | 'retest' | 'retestElsewhere' | 'repair' | 'hold' | 'stop';
-}
+export type ResultAnswer = Pick<
+  components['schemas']['ResultAnswerDto'],
+  'resultId' | 'verdict' | 'disposition'
+>;
