@@ -22,9 +22,7 @@ export async function createTestApp(settings: Record<string, string> = {}) {
   const app = module.createNestApplication({ logger: false });
   configureApp(app);
   await app.listen(0, '127.0.0.1');
-  const close = async () => {
-    await app.close();
-    rmSync(dataDir, { recursive: true });
-  };
+  let closing: Promise<void> | null = null;
+  const close = () => (closing ??= app.close().then(() => rmSync(dataDir, { recursive: true })));
   return { app, server: app.getHttpServer() as Server, env, time, close };
 }

@@ -1,3 +1,4 @@
+import { setImmediate as nextTurn } from 'node:timers/promises';
 import { Injectable, type OnModuleDestroy } from '@nestjs/common';
 import { type Observable, Subject } from 'rxjs';
 
@@ -15,14 +16,16 @@ export interface LiveEvent {
 export class LiveService implements OnModuleDestroy {
   private readonly subject = new Subject<LiveEvent>();
 
-  /** Ends when the server stops, so that open streams don't hold it up. */
+  /** Ends when the server stops. */
   readonly events: Observable<LiveEvent> = this.subject.asObservable();
 
   publish(event: LiveEvent): void {
     this.subject.next(event);
   }
 
-  onModuleDestroy(): void {
+  /** Open streams would hold up the stop: ended now, their connections are idle when the server closes those. */
+  async onModuleDestroy(): Promise<void> {
     this.subject.complete();
+    await nextTurn();
   }
 }
