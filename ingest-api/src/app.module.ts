@@ -18,6 +18,7 @@ import { LocalMailboxModule } from './local-mailbox/local-mailbox.module.js';
 import { MailModule } from './mail/mail.module.js';
 import { ProductsModule } from './products/products.module.js';
 import { ResultsModule } from './results/results.module.js';
+import { SiteSetupModule } from './site-setup/site-setup.module.js';
 import { SiteModule } from './site/site.module.js';
 import { StationsModule } from './stations/stations.module.js';
 import { TodayModule } from './today/today.module.js';
@@ -50,6 +51,7 @@ export class AppModule {
         UnitsModule,
         TodayModule,
         SiteModule,
+        SiteSetupModule,
       ],
       // After the access guard, which AuthModule brings: it counts by the key that guard found.
       providers: [{ provide: APP_GUARD, useClass: KeyThrottlerGuard }],

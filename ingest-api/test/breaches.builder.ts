@@ -4,29 +4,10 @@ import type { Transaction } from 'sequelize';
 import type { MeasureJudgement, MeasureName } from '../src/analysis/analysis.types.js';
 import { BreachRecorder, type FailedResult, type RecordedBreach } from '../src/breaches/breach-recorder.js';
 import { Writer } from '../src/database/writer.js';
-import { Product } from '../src/products/models/product.model.js';
-import { Stage } from '../src/products/models/stage.model.js';
 import { Result } from '../src/results/models/result.model.js';
 import { Unit } from '../src/results/models/unit.model.js';
-import { Station } from '../src/stations/models/station.model.js';
 
-const partNumber = 'FH-R500-W';
-const createdAt = Date.parse('2026-11-01T08:00:00Z');
-
-const aProduct = {
-  partNumber,
-  description: '500 µA source, Wilson mirror',
-  nominalAmps: 500e-6,
-  supplyVolts: 9,
-  complianceLowVolts: 0,
-  complianceHighVolts: 8,
-  complianceTolerance: 0.01,
-  direction: 'source',
-  circuitKind: 'wilsonMirror',
-  hasEmitterResistors: false,
-  createdAt,
-};
-
+/** A failing result of the product of `aSite()`; its stages are `board` (1) and `final` (2). */
 export interface FailWish {
   serialNumber: string;
   stageId: number;
@@ -49,18 +30,6 @@ export const aJudgement = (name: MeasureName): MeasureJudgement => ({
   outcome: 'fail',
   probabilityOfConformity: 0,
 });
-
-/** One product with the stages `board` (1) and `final` (2), and the station `north-1`. */
-export async function addLine(app: INestApplicationContext): Promise<void> {
-  await app.get(Writer).run(async (transaction) => {
-    const { productId } = await Product.create(aProduct, { transaction });
-    for (const [index, name] of ['board', 'final'].entries()) {
-      const position = index + 1;
-      await Stage.create({ stageId: position, productId, name, position, maxAttempts: 3 }, { transaction });
-    }
-    await Station.create({ name: 'north-1', line: 'north', active: true, createdAt }, { transaction });
-  });
-}
 
 const aFail: Omit<FailWish, 'receivedAt' | 'startedAt'> = {
   serialNumber: 'W26480417',
@@ -100,7 +69,7 @@ async function storeResult(transaction: Transaction, wish: FailWish): Promise<Fa
     { transaction },
   );
   const stage = wish.stageId === 1 ? 'board' : 'final';
-  return { ...wish, resultId, resultUuid, judgement, partNumber, stage };
+  return { ...wish, resultId, resultUuid, judgement, partNumber: 'FH-R500-W', stage };
 }
 
 const aResultRow = {

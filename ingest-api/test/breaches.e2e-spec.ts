@@ -1,38 +1,56 @@
-import request from 'supertest';
+import type TestAgent from 'supertest/lib/agent.js';
 import { AuditEntry } from '../src/audit/models/audit-entry.model.js';
 import { BreachRecorder } from '../src/breaches/breach-recorder.js';
 import { Breach } from '../src/breaches/models/breach.model.js';
 import { Writer } from '../src/database/writer.js';
 import { OutboxMail } from '../src/mail/models/outbox-mail.model.js';
 import { Result } from '../src/results/models/result.model.js';
-import { addAccount, signIn } from './accounts.builder.js';
-import { createTestApp } from './breaches-app.js';
-import { addLine, storeFails } from './breaches.builder.js';
+import { addAccount } from './accounts.builder.js';
+import { storeFails } from './breaches.builder.js';
+import { aFailingResult } from './builders.js';
+import { createTestApp, emailOf, type TestApp } from './create-test-app.js';
 
 const DAY_MS = 86_400_000;
-const qualityLead = 'qualitylead@fernhollow.example';
+const qualityLead = emailOf('qualityLead');
 
 describe('breaches', () => {
-  let test: Awaited<ReturnType<typeof createTestApp>>;
-  let lead: Awaited<ReturnType<typeof signIn>>;
+  let test: TestApp;
+  let lead: TestAgent;
 
   beforeEach(async () => {
     test = await createTestApp();
-    await addLine(test.app);
-    await addAccount(test.app, { role: 'qualityLead' });
-    lead = await signIn(test.server, qualityLead);
+    lead = await test.as('qualityLead');
   });
   afterEach(() => test.close());
 
-  const fails = (...wishes: Parameters<typeof storeFails>[2]) => storeFails(test.app, test.time.now, wishes);
-  const get = async (path: string) =>
-    (await request(test.server).get(`/api/v1${path}`).set(lead).expect(200)).body;
-  const post = (path: string, body: object, who = lead) =>
-    request(test.server).post(`/api/v1${path}`).set(who).send(body);
+  const fails = (...wishes: Parameters<typeof storeFails>[2]) => storeFails(test.app, test.clock.now, wishes);
+  const get = async (path: string) => (await lead.get(`/api/v1${path}`).expect(200)).body;
+  const post = (path: string, body: object, who = lead) => who.post(`/api/v1${path}`).send(body);
   const close = (breachId: number) =>
     post(`/breaches/${breachId}/close`, { cause: 'low Early voltage', action: 'reel returned' });
 
   describe('opening', () => {
+    it('follows from a posted result that fails, in the same transaction', async () => {
+      const { body: answer } = await test.post(aFailingResult()).expect(201);
+      expect(answer.verdict).toBe('fail');
+      const breaches = await get('/breaches');
+      expect(breaches.items).toContainEqual(
+        expect.objectContaining({
+          measure: 'outputImpedance',
+          latest: expect.objectContaining({ resultId: answer.resultId }),
+        }),
+      );
+    });
+
+    it.each([
+      ['golden', { runKind: 'golden' as const }],
+      ['practice', { runKind: 'practice' as const }],
+      ['aborted', { outcome: 'aborted' as const, abortReason: 'door open' }],
+    ])('never follows from a %s result', async (_, overrides) => {
+      await test.post(aFailingResult(overrides)).expect(201);
+      expect((await get('/breaches')).items).toEqual([]);
+    });
+
     it('makes one breach and one mail of many fails of one cause', async () => {
       const batch = Array.from({ length: 40 }, (_, index) => ({ serialNumber: `W264804${index}` }));
       await fails(...batch);
@@ -80,17 +98,16 @@ describe('breaches', () => {
     });
 
     it('mails every active quality lead and nobody else', async () => {
-      await addAccount(test.app, { role: 'qualityLead', email: 'deputy@fernhollow.example' });
-      await addAccount(test.app, { role: 'qualityLead', email: 'left@fernhollow.example', active: false });
-      await addAccount(test.app, { role: 'viewer' });
+      await addAccount(test.app, { role: 'qualityLead', email: 'deputy@site.example' });
+      await addAccount(test.app, { role: 'qualityLead', email: 'left@site.example', active: false });
       await fails({});
       const mails = await OutboxMail.findAll({ order: [['recipient', 'ASC']] });
-      expect(mails.map(({ recipient }) => recipient)).toEqual(['deputy@fernhollow.example', qualityLead]);
+      expect(mails.map(({ recipient }) => recipient)).toEqual(['deputy@site.example', qualityLead]);
     });
 
     it('sends no mail for seeded and day-old results', async () => {
       await fails({ seeded: true });
-      await fails({ stageId: 1, startedAt: test.time.now - DAY_MS - 1 });
+      await fails({ stageId: 1, startedAt: test.clock.now - DAY_MS - 1 });
       expect((await get('/breaches')).items).toHaveLength(2);
       expect(await OutboxMail.count()).toBe(0);
     });
@@ -147,36 +164,35 @@ describe('breaches', () => {
   describe('their life', () => {
     it('shows the results that belong to one, newest first, with the judging in words', async () => {
       await fails({ serialNumber: 'W1' });
-      test.time.now += 60_000;
+      test.clock.now += 60_000;
       await fails({ serialNumber: 'W2' });
       const breach = await get('/breaches/1');
       expect(breach.events.map((event: { run: { serialNumber: string } }) => event.run.serialNumber)).toEqual(
         ['W2', 'W1'],
       );
       expect(breach.events[0].text).toMatch(/^Output impedance is .*at least 5 MΩ is required, so it fails/);
-      expect(breach.events[0].at).toBe('2026-11-30T08:01:00.000Z');
+      expect(breach.events[0].at).toBe('2026-11-30T12:01:00.000Z');
       expect(breach).toMatchObject({
-        openedAt: '2026-11-30T08:00:00.000Z',
-        lastEventAt: '2026-11-30T08:01:00.000Z',
+        openedAt: '2026-11-30T12:00:00.000Z',
+        lastEventAt: '2026-11-30T12:01:00.000Z',
         mails: [{ to: qualityLead, attempts: expect.any(Number) }],
       });
     });
 
     it('is acknowledged with a note, once', async () => {
       await fails({});
-      const engineer = await addAccount(test.app, { role: 'productionEngineer' });
-      const who = await signIn(test.server, engineer.email);
+      const who = await test.as('productionEngineer');
       const { body } = await post('/breaches/1/acknowledge', { note: '  on it ' }, who).expect(200);
       expect(body).toMatchObject({
         state: 'acknowledged',
-        acknowledgedBy: engineer.email,
-        acknowledgedAt: '2026-11-30T08:00:00.000Z',
+        acknowledgedBy: emailOf('productionEngineer'),
+        acknowledgedAt: '2026-11-30T12:00:00.000Z',
         note: 'on it',
       });
       const again = await post('/breaches/1/acknowledge', { note: 'me too' }).expect(409);
       expect(again.body).toMatchObject({
         code: 'breach_acknowledged',
-        detail: `${engineer.email} acknowledged it already.`,
+        detail: `${emailOf('productionEngineer')} acknowledged it already.`,
       });
     });
 
@@ -234,10 +250,10 @@ describe('breaches', () => {
     });
 
     it('answers 404 for one that is not there and 400 for what is no number', async () => {
-      await request(test.server).get('/api/v1/breaches/7').set(lead).expect(404);
+      await lead.get('/api/v1/breaches/7').expect(404);
       await post('/breaches/7/acknowledge', { note: 'x' }).expect(404);
       await close(7).expect(404);
-      await request(test.server).get('/api/v1/breaches/seven').set(lead).expect(400);
+      await lead.get('/api/v1/breaches/seven').expect(400);
     });
 
     it('lists in pages, newest opened first', async () => {

@@ -1,20 +1,22 @@
+import type { Server } from 'node:http';
 import type { AddressInfo } from 'node:net';
-import { addAccount, signIn } from './accounts.builder.js';
-import { createTestApp } from './breaches-app.js';
-import { addLine, storeFails } from './breaches.builder.js';
+import { signIn } from './accounts.builder.js';
+import { storeFails } from './breaches.builder.js';
+import { createTestApp, emailOf, type TestApp, testPassword } from './create-test-app.js';
 
 describe('the live stream', () => {
-  let test: Awaited<ReturnType<typeof createTestApp>>;
+  let test: TestApp;
 
   beforeEach(async () => {
     test = await createTestApp();
-    await addLine(test.app);
-    await addAccount(test.app);
   });
   afterEach(() => test.close());
 
+  const server = () => test.app.getHttpServer() as Server;
+  const signedIn = () => signIn(server(), emailOf('viewer'), testPassword);
+
   async function follow(headers: Record<string, string>): Promise<Response> {
-    const { port } = test.server.address() as AddressInfo;
+    const { port } = server().address() as AddressInfo;
     return fetch(`http://127.0.0.1:${port}/api/v1/live`, { headers });
   }
 
@@ -33,11 +35,11 @@ describe('the live stream', () => {
   }
 
   it('pings at once and brings a breach as it opens', async () => {
-    const response = await follow(await signIn(test.server, 'viewer@fernhollow.example'));
+    const response = await follow(await signedIn());
     expect(response.headers.get('content-type')).toMatch(/^text\/event-stream/);
     const readUntil = reading(response);
     expect(await readUntil('event: ping')).not.toContain('breaches');
-    await storeFails(test.app, test.time.now, [{}]);
+    await storeFails(test.app, test.clock.now, [{}]);
     expect(await readUntil('data: {"topic":"breaches","id":"1"}')).toMatch(/event: ping/);
   });
 
@@ -48,7 +50,7 @@ describe('the live stream', () => {
   });
 
   it('ends when the server stops', async () => {
-    const readUntil = reading(await follow(await signIn(test.server, 'viewer@fernhollow.example')));
+    const readUntil = reading(await follow(await signedIn()));
     await readUntil('event: ping');
     await Promise.all([test.close(), expect(readUntil('event: never')).rejects.toThrow('The stream ended')]);
   });

@@ -1,29 +1,27 @@
-import request from 'supertest';
+import type TestAgent from 'supertest/lib/agent.js';
 import { Outbox } from '../src/mail/outbox.js';
-import { addAccount, signIn } from './accounts.builder.js';
-import { createTestApp } from './breaches-app.js';
-import { addLine, storeFails } from './breaches.builder.js';
+import { addAccount } from './accounts.builder.js';
+import { storeFails } from './breaches.builder.js';
+import { createTestApp, emailOf, type TestApp } from './create-test-app.js';
 
-const lead = 'qualitylead@fernhollow.example';
-const deputy = 'deputy@fernhollow.example';
+const lead = emailOf('qualityLead');
+const deputy = 'deputy@site.example';
 
 describe('the local mailbox', () => {
-  let test: Awaited<ReturnType<typeof createTestApp>>;
-  let who: Awaited<ReturnType<typeof signIn>>;
+  let test: TestApp;
+  let who: TestAgent;
 
   const start = async (settings: Record<string, string> = {}) => {
     test = await createTestApp(settings);
-    await addAccount(test.app, { role: 'qualityLead', email: lead });
-    who = await signIn(test.server, lead);
+    who = await test.as('qualityLead');
   };
   afterEach(() => test.close());
 
-  const get = (path: string) => request(test.server).get(`/api/v1${path}`).set(who);
+  const get = (path: string) => who.get(`/api/v1${path}`);
 
   it('shows what the quality lead gets for a failing unit', async () => {
     await start();
-    await addLine(test.app);
-    await storeFails(test.app, test.time.now, [{ serialNumber: '<b>W1</b>' }]);
+    await storeFails(test.app, test.clock.now, [{ serialNumber: '<b>W1</b>' }]);
     await test.app.get(Outbox).deliverDue();
     const { body: page } = await get('/mailbox').expect(200);
     expect(page).toMatchObject({
@@ -32,7 +30,7 @@ describe('the local mailbox', () => {
         {
           to: [lead],
           subject: 'FH-R500-W at final: output impedance 3.1 MΩ, at least 5 MΩ required (unit <b>W1</b>)',
-          receivedAt: '2026-11-30T08:00:00.000Z',
+          receivedAt: '2026-11-30T12:00:00.000Z',
           messageId: expect.stringMatching(/^<breach-1-/),
         },
       ],
@@ -48,9 +46,8 @@ describe('the local mailbox', () => {
 
   it('is sorted by person', async () => {
     await start();
-    await addLine(test.app);
     await addAccount(test.app, { role: 'qualityLead', email: deputy });
-    await storeFails(test.app, test.time.now, [{ stageId: 1 }, { stageId: 2 }]);
+    await storeFails(test.app, test.clock.now, [{ stageId: 1 }, { stageId: 2 }]);
     await test.app.get(Outbox).deliverDue();
     const { body } = await get(`/mailbox?to=${deputy.toUpperCase()}`).expect(200);
     expect(body.addresses).toEqual([deputy, lead]);

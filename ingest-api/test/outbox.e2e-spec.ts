@@ -1,20 +1,19 @@
-import request from 'supertest';
 import { Writer } from '../src/database/writer.js';
 import { OutboxMail } from '../src/mail/models/outbox-mail.model.js';
 import { Outbox } from '../src/mail/outbox.js';
-import { addAccount, signIn } from './accounts.builder.js';
-import { createTestApp } from './breaches-app.js';
-import { addLine, storeFails } from './breaches.builder.js';
+import { addAccount } from './accounts.builder.js';
+import { storeFails } from './breaches.builder.js';
+import { createTestApp, emailOf, type TestApp } from './create-test-app.js';
 import { FaultySmtpServer } from './outbox-smtp-server.js';
 
 const HOUR_MS = 3_600_000;
-const lead = 'qualitylead@fernhollow.example';
-const deputy = 'deputy@fernhollow.example';
+const lead = emailOf('qualityLead');
+const deputy = 'deputy@site.example';
 
 describe('the outbox', () => {
   let smtp: FaultySmtpServer;
   let port: number;
-  let test: Awaited<ReturnType<typeof createTestApp>>;
+  let test: TestApp;
   let outbox: Outbox;
 
   beforeEach(async () => {
@@ -26,18 +25,16 @@ describe('the outbox', () => {
       AMPKEEP_PUBLIC_URL: 'https://ampkeep.fernhollow.example',
     });
     outbox = test.app.get(Outbox);
-    await addLine(test.app);
-    await addAccount(test.app, { role: 'qualityLead', email: lead });
   });
   afterEach(async () => {
     await test.close();
     await smtp.close();
   });
 
-  const fail = (stageId = 2) => storeFails(test.app, test.time.now, [{ stageId }]);
+  const fail = (stageId = 2) => storeFails(test.app, test.clock.now, [{ stageId }]);
   const deliver = () => outbox.deliverDue();
   const deliverAfter = async (pause: number) => {
-    test.time.now += pause;
+    test.clock.now += pause;
     await deliver();
   };
   const mailTo = (recipient: string) => OutboxMail.findOne({ where: { recipient }, rejectOnEmpty: true });
@@ -52,7 +49,7 @@ describe('the outbox', () => {
     expect(mail).toMatchObject({
       state: 'sent',
       attempts: 1,
-      sentAt: Date.parse('2026-11-30T08:00:00Z'),
+      sentAt: Date.parse('2026-11-30T12:00:00Z'),
       lastError: null,
     });
     expect(mail.messageId).toMatch(/@ampkeep\.fernhollow\.example>$/);
@@ -83,15 +80,12 @@ describe('the outbox', () => {
     'gives up at once when the server refuses the %s for good, and shows what it said',
     async (_, refuse) => {
       refuse();
-      const viewer = await addAccount(test.app);
       await fail();
       await deliver();
       await deliverAfter(HOUR_MS);
       expect(smtp.received).toEqual([]);
-      const breach = await request(test.server)
-        .get('/api/v1/breaches/1')
-        .set(await signIn(test.server, viewer.email))
-        .expect(200);
+      const viewer = await test.as('viewer');
+      const breach = await viewer.get('/api/v1/breaches/1').expect(200);
       expect(breach.body.mails).toMatchObject([
         {
           to: lead,
@@ -106,22 +100,20 @@ describe('the outbox', () => {
 
   it('lets a poisoned mail hold up no other', async () => {
     await addAccount(test.app, { role: 'qualityLead', email: deputy });
-    await test.app
-      .get(Writer)
-      .run((transaction) =>
-        OutboxMail.create(
-          {
-            ...{
-              messageId: '<nothing@x>',
-              breachId: null,
-              recipient: 'nobody@fernhollow.example',
-              subject: '',
-            },
-            ...{ state: 'waiting', createdAt: 1, nextTryAt: test.time.now },
+    await test.app.get(Writer).run((transaction) =>
+      OutboxMail.create(
+        {
+          ...{
+            messageId: '<nothing@x>',
+            breachId: null,
+            recipient: 'nobody@site.example',
+            subject: '',
           },
-          { transaction },
-        ),
-      );
+          ...{ state: 'waiting', createdAt: 1, nextTryAt: test.clock.now },
+        },
+        { transaction },
+      ),
+    );
     smtp.rcpt = { [lead]: 451 };
     await fail();
     await deliver();

@@ -1,9 +1,9 @@
-import request from 'supertest';
+import type { Server } from 'node:http';
 import type { RightDto } from '../src/auth/dto/right.dto.js';
 import { type Access, rights } from '../src/auth/rights.js';
 import { roles } from '../src/auth/roles.js';
-import { addAccount, signIn } from './accounts.builder.js';
-import { createTestApp } from './scratch-app.js';
+import { ask, signIn } from './accounts.builder.js';
+import { createTestApp, emailOf, type TestApp } from './create-test-app.js';
 
 interface Layer {
   route?: { path: string; methods: Record<string, boolean> };
@@ -15,17 +15,16 @@ const table: [route: string, access: Access][] = Object.entries(rights);
 const concrete = (path: string): string => path.replace(/:\w+/g, '0193f3a2-6f0e-7c52-9a3e-5b1f4c0d2e11');
 
 describe('rights', () => {
-  let test: Awaited<ReturnType<typeof createTestApp>>;
-  const server = () => test.app.getHttpServer();
+  let test: TestApp;
+  const server = () => test.app.getHttpServer() as Server;
 
   beforeAll(async () => {
     test = await createTestApp();
-    for (const role of roles) await addAccount(test.app, { role });
   });
   afterAll(() => test.close());
 
   /** Status and problem code; the body of an answer that never ends (live events) is not waited for. */
-  async function ask(
+  async function knock(
     route: string,
     headers: Record<string, string>,
   ): Promise<{ status: number; code?: string }> {
@@ -54,15 +53,15 @@ describe('rights', () => {
   });
 
   it.each(table)('%s lets in whom the table names and nobody else', async (route, access) => {
-    const stranger = await ask(route, { 'Sec-Fetch-Site': 'same-origin' });
+    const stranger = await knock(route, { 'Sec-Fetch-Site': 'same-origin' });
     if (access.public) {
-      expect(stranger.code ?? '').not.toMatch(/not_signed_in|key_unknown|foreign_origin/);
+      expect(stranger.code ?? '').not.toMatch(/not_signed_in|key_unknown|origin_not_allowed/);
       return;
     }
     expect(stranger).toEqual({ status: 401, code: access.roles ? 'not_signed_in' : 'key_unknown' });
     for (const role of roles) {
-      const session = await signIn(server(), `${role}@fernhollow.example`);
-      const answer = await ask(route, session);
+      const session = await signIn(server(), emailOf(role));
+      const answer = await knock(route, session);
       if (!access.roles) expect(answer).toEqual({ status: 401, code: 'key_unknown' });
       else if (!access.roles.includes(role))
         expect(answer).toEqual({ status: 403, code: 'role_not_allowed' });
@@ -74,15 +73,15 @@ describe('rights', () => {
     '%s is not taken from a page of another site',
     async (route, access) => {
       const role = access.roles?.[0] ?? 'viewer';
-      const { Cookie } = await signIn(server(), `${role}@fernhollow.example`);
-      const answer = await ask(route, { Cookie, Origin: 'https://elsewhere.example' });
-      expect(answer).toEqual({ status: 403, code: 'foreign_origin' });
+      const { Cookie } = await signIn(server(), emailOf(role));
+      const answer = await knock(route, { Cookie, Origin: 'https://elsewhere.example' });
+      expect(answer).toEqual({ status: 403, code: 'origin_not_allowed' });
     },
   );
 
   it('are listed for whoever is signed in, each with what it is for', async () => {
-    const session = await signIn(server(), 'viewer@fernhollow.example');
-    const { body } = await request(server()).get('/api/v1/rights').set(session).expect(200);
+    const session = await signIn(server(), emailOf('viewer'));
+    const { body } = await ask(server()).get('/api/v1/rights').set(session).expect(200);
     const listed = body as RightDto[];
     expect(listed).toHaveLength(table.length);
     expect(listed.filter(({ summary }) => summary === '')).toEqual([]);
@@ -100,6 +99,6 @@ describe('rights', () => {
   });
 
   it('answer an unknown address with 404, signed in or not', async () => {
-    expect(await ask('GET /api/v1/nowhere', {})).toEqual({ status: 404, code: 'not_found' });
+    expect(await knock('GET /api/v1/nowhere', {})).toEqual({ status: 404, code: 'not_found' });
   });
 });

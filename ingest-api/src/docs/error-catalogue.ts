@@ -33,7 +33,7 @@ export const errorCatalogue: readonly { code: string; status: number; meaning: s
     remedy: 'Ask someone whose role may; Settings shows the table.',
   },
   {
-    code: 'origin_not_allowed',
+    code: 'foreign_origin',
     status: 403,
     meaning: 'A change was asked for from another site.',
     remedy: "Use the dashboard's own address.",

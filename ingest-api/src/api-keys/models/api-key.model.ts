@@ -1,4 +1,5 @@
 import { Column, DataType, Model, Table } from 'sequelize-typescript';
+import { booleanColumn } from '../../database/columns.js';
 
 @Table({ tableName: 'api_keys' })
 export class ApiKey extends Model {
@@ -9,7 +10,7 @@ export class ApiKey extends Model {
   /** SHA-256 (hex) of the 256-bit secret: nothing to guess, so no slow hash is needed. */
   @Column(DataType.TEXT) declare secretHash: string;
   @Column(DataType.TEXT) declare label: string;
-  @Column(DataType.BOOLEAN) declare practice: boolean;
+  @Column(booleanColumn('practice')) declare practice: boolean;
   @Column(DataType.TEXT) declare createdBy: string;
   @Column(DataType.INTEGER) declare createdAt: number;
   @Column(DataType.INTEGER) declare expiresAt: number | null;

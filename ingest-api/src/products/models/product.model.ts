@@ -1,5 +1,6 @@
 import { Column, DataType, Model, Table } from 'sequelize-typescript';
 import type { CircuitKind } from '../../analysis/analysis.types.js';
+import { booleanColumn } from '../../database/columns.js';
 
 @Table({ tableName: 'products' })
 export class Product extends Model {
@@ -14,6 +15,6 @@ export class Product extends Model {
   @Column(DataType.REAL) declare complianceTolerance: number;
   @Column(DataType.TEXT) declare direction: 'source' | 'sink';
   @Column(DataType.TEXT) declare circuitKind: CircuitKind;
-  @Column(DataType.BOOLEAN) declare hasEmitterResistors: boolean;
+  @Column(booleanColumn('hasEmitterResistors')) declare hasEmitterResistors: boolean;
   @Column(DataType.INTEGER) declare createdAt: number;
 }

@@ -7,6 +7,7 @@ import type {
   Verdict,
 } from '../../analysis/analysis.types.js';
 import type { ResultAnswer, RunKind } from '../result.types.js';
+import { booleanColumn, jsonColumn } from '../../database/columns.js';
 
 /** One accepted sweep with its judgement. Times are epoch milliseconds; figures are SI. */
 @Table({ tableName: 'results' })
@@ -24,7 +25,7 @@ export class Result extends Model {
   @Column(DataType.TEXT) declare runKind: RunKind;
   @Column(DataType.TEXT) declare outcome: Outcome;
   /** Belongs to the yields: production, judged, neither aborted nor voided. */
-  @Column(DataType.BOOLEAN) declare counted: boolean;
+  @Column(booleanColumn('counted')) declare counted: boolean;
   @Column(DataType.INTEGER) declare attempt: number | null;
   @Column(DataType.TEXT) declare verdict: Verdict;
   @Column(DataType.TEXT) declare firstVerdict: Verdict;
@@ -32,7 +33,7 @@ export class Result extends Model {
   @Column(DataType.INTEGER) declare finishedAt: number | null;
   @Column(DataType.INTEGER) declare sentAt: number | null;
   @Column(DataType.INTEGER) declare receivedAt: number;
-  @Column(DataType.BOOLEAN) declare seeded: boolean;
+  @Column(booleanColumn('seeded')) declare seeded: boolean;
   @Column(DataType.INTEGER) declare voidedAt: number | null;
   @Column(DataType.REAL) declare conductanceSiemens: number | null;
   /** Expanded, k ≈ 2. */
@@ -41,8 +42,8 @@ export class Result extends Model {
   @Column(DataType.REAL) declare impedanceOhms: number | null;
   @Column(DataType.TEXT) declare impedanceBound: Bound;
   @Column(DataType.REAL) declare referenceAmps: number | null;
-  @Column(DataType.JSON) declare failedMeasures: MeasureName[];
-  @Column(DataType.JSON) declare flags: string[];
-  @Column(DataType.JSON) declare judgement: MeasureJudgement[];
-  @Column(DataType.JSON) declare answer: ResultAnswer;
+  @Column(jsonColumn('failedMeasures')) declare failedMeasures: MeasureName[];
+  @Column(jsonColumn('flags')) declare flags: string[];
+  @Column(jsonColumn('judgement')) declare judgement: MeasureJudgement[];
+  @Column(jsonColumn('answer')) declare answer: ResultAnswer;
 }

@@ -1,5 +1,6 @@
 import { Column, DataType, Model, Table } from 'sequelize-typescript';
 import type { Role } from '../../auth/roles.js';
+import { booleanColumn } from '../../database/columns.js';
 
 @Table({ tableName: 'users' })
 export class User extends Model {
@@ -9,9 +10,9 @@ export class User extends Model {
   @Column(DataType.TEXT) declare displayName: string;
   @Column(DataType.TEXT) declare role: Role;
   @Column(DataType.TEXT) declare passwordHash: string;
-  @Column(DataType.BOOLEAN) declare active: boolean;
+  @Column(booleanColumn('active')) declare active: boolean;
   /** A demo account's password is public: real use refuses a database that holds one. */
-  @Column(DataType.BOOLEAN) declare demo: boolean;
+  @Column(booleanColumn('demo')) declare demo: boolean;
   @Column(DataType.INTEGER) declare createdAt: number;
   @Column(DataType.INTEGER) declare lastSignInAt: number | null;
 }
