@@ -11,11 +11,10 @@ export const paths = {
     ),
   stations: () => '/stations',
   breaches: (query: Record<string, string> = {}) => withQuery('/breaches', query),
-  breach: (breachId: string) => `/breaches/${encodeURIComponent(breachId)}`,
+  breach: (breachId: number) => `/breaches/${breachId}`,
   intake: (query: Record<string, string> = {}) => withQuery('/intake', query),
   connect: () => '/connect',
   settings: () => '/settings',
-  proof: () => '/settings/proof',
   mailbox: () => '/mailbox',
 };
 

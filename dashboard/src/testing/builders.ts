@@ -30,7 +30,7 @@ export function aSite(overrides: Partial<Site> = {}): Site {
 
 export function aUser(overrides: Partial<User> = {}): User {
   return {
-    userId: 'user-1',
+    userId: 1,
     email: 'lead@fernhollow.example',
     displayName: 'Ines Calder',
     role: 'qualityLead',
@@ -137,7 +137,7 @@ export function aTodayProduct(overrides: Partial<TodayProduct> = {}): TodayProdu
 
 export function aBreach(overrides: Partial<Breach> = {}): Breach {
   return {
-    breachId: 'breach-1',
+    breachId: 1,
     title: 'FH-R500-W final: output impedance below its limit',
     partNumber: 'FH-R500-W',
     stage: 'final',

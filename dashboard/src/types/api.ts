@@ -50,5 +50,3 @@ export type RefusedPost = Schemas['RefusedPostDto'];
 export type MailboxPage = Schemas['MailboxPageDto'];
 export type MailboxItem = Schemas['MailboxItemDto'];
 export type MailboxMail = Schemas['MailboxMailDto'];
-export type Proof = Schemas['ProofDto'];
-export type ProofRow = Schemas['ProofRowDto'];

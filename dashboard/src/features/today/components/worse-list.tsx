@@ -4,7 +4,9 @@ import type { TodayChange } from '@/types/api';
 import styles from './worse-list.module.css';
 
 function unitsBehind({ kind, partNumber, stage, station }: TodayChange): string {
-  const query: Record<string, string> = kind === 'silent' ? {} : { partNumber, stage };
+  const query: Record<string, string> = {};
+  if (partNumber !== null) query.partNumber = partNumber;
+  if (stage !== null) query.stage = stage;
   if (station !== null) query.station = station;
   if (kind === 'notProven') query.verdict = 'notProven';
   return paths.units(query);
