@@ -60,10 +60,7 @@ async function build(stamp) {
 /** Builds a workspace once those it is built against are ready; tells their hash on, so that changes spread. */
 async function buildOne({ name, output, after }, builds, running) {
   const below = await Promise.all(after.map((other) => running.get(other)));
-  const own = hashFiles([
-    ...sharedSources.map((file) => join(root, file)),
-    ...sourceFiles(join(root, name)),
-  ]);
+  const own = hashFiles([...sharedSources.map((file) => join(root, file)), ...sourceFiles(join(root, name))]);
   const hash = createHash('sha256')
     .update([own, ...below].join(' '))
     .digest('hex');
@@ -86,7 +83,8 @@ function sourceFiles(directory) {
 
 function hashFiles(files) {
   const hash = createHash('sha256');
-  for (const file of files) hash.update(file.slice(root.length)).update('\0').update(readFileSync(file)).update('\0');
+  for (const file of files)
+    hash.update(file.slice(root.length)).update('\0').update(readFileSync(file)).update('\0');
   return hash.digest('hex');
 }
 

@@ -3,7 +3,7 @@ import type { LimitFacts, ProductFacts, StageFacts, StageName, TestPlanFacts } f
 /* Invented products of an invented maker; figures chosen so that their circuits are plausible. */
 
 const boardPlan = (loadVolts: readonly number[], referenceVolts: number): TestPlanFacts => ({
-  version: 2,
+  version: 1,
   loadVolts,
   referenceVolts,
   dwellMs: 400,
@@ -12,7 +12,7 @@ const boardPlan = (loadVolts: readonly number[], referenceVolts: number): TestPl
 });
 
 const finalPlan = (loadVolts: readonly number[], referenceVolts: number): TestPlanFacts => ({
-  version: 3,
+  version: 1,
   loadVolts,
   referenceVolts,
   dwellMs: 800,
