@@ -3,8 +3,10 @@ import { getConnectionToken } from '@nestjs/sequelize';
 import type { Sequelize } from 'sequelize-typescript';
 import { AuditService } from '../src/audit/audit.service.js';
 import { AuditEntry } from '../src/audit/models/audit-entry.model.js';
+import { roles } from '../src/auth/roles.js';
 import { Writer } from '../src/database/writer.js';
 import { FirstAdministrator, refuseDemoAccounts } from '../src/users/first-administrator.js';
+import { Session } from '../src/users/models/session.model.js';
 import { User } from '../src/users/models/user.model.js';
 import { addAccount, ask, signIn } from './accounts.builder.js';
 import { createTestApp, emailOf, type TestApp, testPassword } from './create-test-app.js';
@@ -14,7 +16,7 @@ const adminEmail = emailOf('administrator');
 describe('accounts', () => {
   let test: TestApp;
   let admin: Awaited<ReturnType<typeof signIn>>;
-  const server = () => test.app.getHttpServer() as Server;
+  const server = (): Server => test.app.getHttpServer();
   const patch = (userId: number, wanted: object) =>
     ask(server()).patch(`/api/v1/users/${userId}`).set(admin).send(wanted);
   const newAccount = {
@@ -43,10 +45,9 @@ describe('accounts', () => {
     });
     await signIn(server(), newAccount.email);
     const list = await ask(server()).get('/api/v1/users').set(admin).expect(200);
-    expect(list.body.map((user: { displayName: string }) => user.displayName)).toEqual([
-      'Ada Moss',
-      'Tomasz Reed',
-    ]);
+    expect(list.body).toContainEqual({ ...created.body, lastSignInAt: '2026-11-30T12:00:00.000Z' });
+    const names = list.body.map((user: { displayName: string }) => user.displayName);
+    expect(names).toEqual([...names].sort());
   });
 
   it.each([
@@ -63,7 +64,7 @@ describe('accounts', () => {
       .send({ ...newAccount, ...wrong })
       .expect(422);
     expect(refused.body.errors).toEqual([expect.objectContaining({ pointer })]);
-    expect(await User.count()).toBe(1);
+    expect(await User.count()).toBe(roles.length);
   });
 
   it('are not created twice for one address', async () => {
@@ -136,7 +137,7 @@ describe('accounts', () => {
       at: '2026-11-30T12:00:00.000Z',
       actor: adminEmail,
       action: 'account.changed',
-      subject: 'viewer@fernhollow.example',
+      subject: 'rosalind.hart@fernhollow.example',
       detail: 'name Rosalind Hart → Rosalind Hart-Moss, role viewer → qualityLead',
     });
     expect(first.body.items[1].action).toBe('session.started');
@@ -156,14 +157,15 @@ describe('accounts', () => {
       ids.push(...page.body.items.map((entry: { auditId: number }) => entry.auditId));
       cursor = page.body.nextCursor as string | null;
     }
-    expect(ids).toEqual(Array.from({ length: 102 }, (_, i) => 102 - i));
+    const all = await AuditEntry.findAll({ order: [['auditEntryId', 'DESC']] });
+    expect(ids).toEqual(all.map(({ auditEntryId }) => auditEntryId));
     await ask(server()).get('/api/v1/audit?cursor=1%20OR%201').set(admin).expect(422);
   });
 
   it('leave a trail that nobody can change or remove', async () => {
     const sequelize: Sequelize = test.app.get(getConnectionToken());
     const before = await AuditEntry.findAll({ raw: true });
-    expect(before).toHaveLength(1);
+    expect(before.length).toBeGreaterThan(0);
     for (const sql of ["UPDATE audit_entries SET actor = 'nobody'", 'DELETE FROM audit_entries']) {
       await expect(sequelize.query(sql)).rejects.toMatchObject({
         parent: { message: expect.stringContaining('append-only') },
@@ -185,13 +187,18 @@ describe('the first administrator', () => {
   it('is made once from the settings, when there is no account at all', async () => {
     const test = await createTestApp({
       AMPKEEP_ADMIN_EMAIL: 'Ada@fernhollow.example',
-      AMPKEEP_ADMIN_PASSWORD: password,
+      AMPKEEP_ADMIN_PASSWORD: testPassword,
     });
-    await test.app.get(FirstAdministrator).createOnce();
-    await test.app.get(FirstAdministrator).createOnce();
-    const api = request(test.app.getHttpServer());
+    const first = test.app.get(FirstAdministrator, { strict: false });
+    await first.createOnce();
+    expect(await User.count()).toBe(roles.length);
+
+    await Session.destroy({ where: {} });
+    await User.destroy({ where: {} });
+    await first.createOnce();
+    await first.createOnce();
     const admin = await signIn(test.app.getHttpServer(), 'ada@fernhollow.example');
-    const list = await ask(server()).get('/api/v1/users').set(admin).expect(200);
+    const list = await ask(test.app.getHttpServer()).get('/api/v1/users').set(admin).expect(200);
     expect(list.body).toEqual([
       expect.objectContaining({ email: 'ada@fernhollow.example', role: 'administrator' }),
     ]);

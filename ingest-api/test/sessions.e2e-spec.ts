@@ -10,7 +10,7 @@ const email = 'rosalind.hart@fernhollow.example';
 
 describe('sessions', () => {
   let test: TestApp;
-  const server = () => test.app.getHttpServer() as Server;
+  const server = (): Server => test.app.getHttpServer();
   const trySignIn = (credentials: object, headers: Record<string, string> = sameOrigin) =>
     ask(server()).post('/api/v1/session').set(headers).send(credentials);
 

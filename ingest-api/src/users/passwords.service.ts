@@ -1,13 +1,15 @@
 import { Inject, Injectable, type OnApplicationShutdown } from '@nestjs/common';
 import { truncates } from 'bcryptjs';
 import { type ErrorPlace, TooManyRequestsError } from '../common/errors.js';
+import { ENV } from '../config/config.module.js';
+import type { Env } from '../config/env.js';
 import { BcryptThread } from './bcrypt-thread.js';
 
-/** Injection token of bcrypt's cost, the logarithm of its rounds; tests hand in the least, 4. */
-export const BCRYPT_COST = Symbol('BCRYPT_COST');
-
-/** About a third of a second a guess on a common server; a cost of 13 would double it. */
-export const bcryptCost = 12;
+/**
+ * bcrypt's cost, the logarithm of its rounds. 12: about a third of a second a guess on a common server.
+ * The demo takes the least: its passwords are public, and it listens to its own machine alone.
+ */
+const bcryptCost = { serve: 12, demo: 4 } as const;
 
 export const leastPasswordCharacters = 12;
 
@@ -36,8 +38,11 @@ export function passwordFault(password: string, pointer: string): ErrorPlace | n
 export class PasswordsService implements OnApplicationShutdown {
   private readonly thread = new BcryptThread();
   private nobodysHash: Promise<string> | null = null;
+  private readonly cost: number;
 
-  constructor(@Inject(BCRYPT_COST) private readonly cost: number) {}
+  constructor(@Inject(ENV) env: Pick<Env, 'mode'>) {
+    this.cost = bcryptCost[env.mode];
+  }
 
   hash(password: string): Promise<string> {
     return this.thread.hash(password, this.cost);

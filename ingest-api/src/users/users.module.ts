@@ -1,6 +1,6 @@
 import { Module } from '@nestjs/common';
 import { FirstAdministrator } from './first-administrator.js';
-import { BCRYPT_COST, bcryptCost, PasswordsService } from './passwords.service.js';
+import { PasswordsService } from './passwords.service.js';
 import { SessionController } from './session.controller.js';
 import { SignInThrottle } from './sign-in-throttle.js';
 import { SignInService } from './sign-in.service.js';
@@ -9,14 +9,7 @@ import { UsersService } from './users.service.js';
 
 @Module({
   controllers: [SessionController, UsersController],
-  providers: [
-    { provide: BCRYPT_COST, useValue: bcryptCost },
-    PasswordsService,
-    SignInThrottle,
-    SignInService,
-    UsersService,
-    FirstAdministrator,
-  ],
+  providers: [PasswordsService, SignInThrottle, SignInService, UsersService, FirstAdministrator],
   exports: [PasswordsService, UsersService, FirstAdministrator],
 })
 export class UsersModule {}
