@@ -15,6 +15,16 @@ export function wilsonMirrorRatio(beta: number): number {
   return 1 / (1 + 2 / (beta * (beta + 2)));
 }
 
+/** What the two-transistor mirror lacks of the reference current, as a fraction: 2/(β+2), about 2/β. */
+export function twoTransistorMirrorError(beta: number): number {
+  return 2 / (beta + 2);
+}
+
+/** What the Wilson mirror lacks, as a fraction: 2/(β(β+2)+2), about 2/β². Not 1 − ratio, which would lose digits. */
+export function wilsonMirrorError(beta: number): number {
+  return 2 / (beta * (beta + 2) + 2);
+}
+
 /** Output resistance of the two-transistor mirror: that of its output transistor. Ω. */
 export function twoTransistorMirrorResistance(transistorOhms: number): number {
   return transistorOhms;
