@@ -17,7 +17,7 @@ async function serve(env: Env): Promise<void> {
   await app.init();
   await refuseDemoAccounts(env);
   await app.get(FirstAdministrator, { strict: false }).createOnce();
-  const server = app.getHttpServer() as Server;
+  const server: Server = app.getHttpServer();
   server.requestTimeout = slowestRequestMs;
   server.headersTimeout = 10_000;
   await app.listen(env.port, env.host);

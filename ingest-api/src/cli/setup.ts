@@ -30,7 +30,12 @@ main(process.argv[2]).catch((error: unknown) => {
   if (error instanceof AmpkeepError) {
     console.error(error.message);
     for (const { pointer, detail } of error.errors) console.error(`  ${pointer || '/'}: ${detail}`);
-  } else if (error instanceof BadSettingsError || error instanceof AccountsNotReadyError || error instanceof SyntaxError) console.error(error.message);
+  } else if (
+    error instanceof BadSettingsError ||
+    error instanceof AccountsNotReadyError ||
+    error instanceof SyntaxError
+  )
+    console.error(error.message);
   else console.error(error);
   process.exitCode = 1;
 });

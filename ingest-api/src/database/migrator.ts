@@ -5,8 +5,8 @@ import { migrations } from './migrations/migration-list.js';
 
 export interface Migration {
   name: string;
-  up(context: QueryInterface): Promise<void>;
-  down(context: QueryInterface): Promise<void>;
+  up: (context: QueryInterface) => Promise<void>;
+  down: (context: QueryInterface) => Promise<void>;
 }
 
 /** Thrown when the database was written by a newer Ampkeep than this one. */

@@ -67,7 +67,7 @@ export class Writer implements OnModuleInit, OnApplicationShutdown {
   /** Hands an item to its handler together with all others of the same handler that wait. */
   submit<Item, Outcome>(handler: BatchHandler<Item, Outcome>, item: Item): Promise<Outcome> {
     return this.enqueue({
-      handler: handler as BatchHandler<unknown, unknown>,
+      handler: handler,
       item,
       work: null,
     }) as Promise<Outcome>;

@@ -39,7 +39,7 @@ export function buildOpenApi(app: INestApplication): OpenAPIObject {
   });
   const united = withNullUnions(document) as OpenAPIObject;
   const schemas = { ...united.components?.schemas, ...postedResultSchemas() };
-  return { ...united, components: { ...united.components, schemas: sortByName(schemas) } } as OpenAPIObject;
+  return { ...united, components: { ...united.components, schemas: sortByName(schemas) } };
 }
 
 /** The result schema as components: its `$defs` become components of their own, so that every tool finds them. */

@@ -1,7 +1,8 @@
 type Schema = Record<string, unknown>;
 
 /** Compilers order the members of a union as they please; sorted, the document is the same on every build. */
-const sorted = (values: readonly unknown[]): unknown[] => [...values].sort((left, right) => (String(left) < String(right) ? -1 : 1));
+const sorted = (values: readonly unknown[]): unknown[] =>
+  [...values].sort((left, right) => (String(left) < String(right) ? -1 : 1));
 
 /**
  * Nest's swagger module writes OpenAPI 3.0's `nullable: true`, which 3.1 doesn't know: turned into a union
@@ -10,8 +11,11 @@ const sorted = (values: readonly unknown[]): unknown[] => [...values].sort((left
 export function withNullUnions(node: unknown): unknown {
   if (Array.isArray(node)) return node.map(withNullUnions);
   if (node === null || typeof node !== 'object') return node;
-  const entries = Object.entries(node).map(([key, value]) => [key, key === 'enum' && Array.isArray(value) ? sorted(value) : withNullUnions(value)] as const);
-  const { nullable, ...schema } = Object.fromEntries(entries) as Schema;
+  const entries = Object.entries(node).map(
+    ([key, value]) =>
+      [key, key === 'enum' && Array.isArray(value) ? sorted(value) : withNullUnions(value)] as const,
+  );
+  const { nullable, ...schema } = Object.fromEntries<unknown>(entries);
   return nullable === true ? orNull(schema) : nullable === undefined ? schema : { ...schema };
 }
 

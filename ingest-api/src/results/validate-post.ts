@@ -1,5 +1,5 @@
-import { Ajv2020, type ErrorObject } from 'ajv/dist/2020.js';
-import addFormatsModule from 'ajv-formats';
+import type { ErrorObject } from 'ajv/dist/2020.js';
+import { createAjv } from '../common/create-ajv.js';
 import type { ErrorPlace } from '../common/errors.js';
 import { pointerOf } from './parse-post.js';
 import schema from './result.schema.json';
@@ -7,9 +7,7 @@ import type { PostedResult } from './result.types.js';
 
 export { schema as resultSchema };
 
-const ajv = new Ajv2020({ allErrors: true, strict: true, strictTypes: false, strictRequired: false, verbose: true });
-addFormatsModule.default(ajv);
-const check = ajv.compile<PostedResult>(schema);
+const check = createAjv({ verbose: true }).compile<PostedResult>(schema);
 const mostErrors = 50;
 
 /** Gives the places where a value breaks the result schema; none means that it is a PostedResult. */

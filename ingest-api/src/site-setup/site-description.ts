@@ -1,6 +1,6 @@
-import { Ajv2020, type ErrorObject } from 'ajv/dist/2020.js';
-import addFormatsModule from 'ajv-formats';
+import type { ErrorObject } from 'ajv/dist/2020.js';
 import type { CircuitKind, Limit, MeasureName } from '../analysis/analysis.types.js';
+import { createAjv } from '../common/create-ajv.js';
 import type { ErrorPlace } from '../common/errors.js';
 import schema from './site.schema.json';
 
@@ -18,7 +18,13 @@ export interface DescribedStage {
   maxAttempts: number;
   yieldTarget?: number;
   effectiveAt?: string;
-  testPlan: { loadVolts: number[]; referenceVolts: number; dwellMs?: number; repeatFirst?: boolean; upAndDown?: boolean };
+  testPlan: {
+    loadVolts: number[];
+    referenceVolts: number;
+    dwellMs?: number;
+    repeatFirst?: boolean;
+    upAndDown?: boolean;
+  };
   limits: DescribedLimit[];
 }
 
@@ -58,9 +64,7 @@ export interface SiteDescription {
   stations: DescribedStation[];
 }
 
-const ajv = new Ajv2020({ allErrors: true, strict: true, strictTypes: false, strictRequired: false });
-addFormatsModule.default(ajv);
-const check = ajv.compile<SiteDescription>(schema);
+const check = createAjv().compile<SiteDescription>(schema);
 
 /** Where a site file breaks its schema or contradicts itself; none means that it can be applied. */
 export function findSiteFaults(value: unknown): ErrorPlace[] {
@@ -70,28 +74,49 @@ export function findSiteFaults(value: unknown): ErrorPlace[] {
 
 function toPlace({ instancePath, keyword, message, params }: ErrorObject): ErrorPlace {
   const extra = (params as { additionalProperty?: string }).additionalProperty;
-  return { pointer: instancePath, code: keyword, detail: `${message ?? 'not valid'}${extra === undefined ? '' : `: "${extra}"`}` };
+  return {
+    pointer: instancePath,
+    code: keyword,
+    detail: `${message ?? 'not valid'}${extra === undefined ? '' : `: "${extra}"`}`,
+  };
 }
 
 function contradictions(product: DescribedProduct, pointer: string): ErrorPlace[] {
   const { complianceLowVolts: low, complianceHighVolts: high } = product;
   const faults: ErrorPlace[] = [];
-  if (low >= high) faults.push({ pointer: `${pointer}/complianceHighVolts`, code: 'range', detail: 'Must lie above complianceLowVolts.' });
+  if (low >= high)
+    faults.push({
+      pointer: `${pointer}/complianceHighVolts`,
+      code: 'range',
+      detail: 'Must lie above complianceLowVolts.',
+    });
   product.stages.forEach((stage, index) => {
     const at = `${pointer}/stages/${index}`;
     const { referenceVolts } = stage.testPlan;
     if (referenceVolts < low || referenceVolts > high) {
-      faults.push({ pointer: `${at}/testPlan/referenceVolts`, code: 'range', detail: `Must lie in the promised range, ${low} to ${high} V.` });
+      faults.push({
+        pointer: `${at}/testPlan/referenceVolts`,
+        code: 'range',
+        detail: `Must lie in the promised range, ${low} to ${high} V.`,
+      });
     }
     if (product.stages.findIndex((other) => other.stage === stage.stage) !== index) {
       faults.push({ pointer: `${at}/stage`, code: 'duplicate', detail: 'Two stages bear this name.' });
     }
     stage.limits.forEach((limit, place) => {
       if (limit.lower !== undefined && limit.upper !== undefined && limit.lower >= limit.upper) {
-        faults.push({ pointer: `${at}/limits/${place}`, code: 'range', detail: 'lower must lie below upper.' });
+        faults.push({
+          pointer: `${at}/limits/${place}`,
+          code: 'range',
+          detail: 'lower must lie below upper.',
+        });
       }
       if (stage.limits.findIndex((other) => other.measure === limit.measure) !== place) {
-        faults.push({ pointer: `${at}/limits/${place}/measure`, code: 'duplicate', detail: 'This measure is limited twice.' });
+        faults.push({
+          pointer: `${at}/limits/${place}/measure`,
+          code: 'duplicate',
+          detail: 'This measure is limited twice.',
+        });
       }
     });
   });

@@ -3,5 +3,9 @@ import { ProductsModule } from '../products/products.module.js';
 import { StationsModule } from '../stations/stations.module.js';
 import { SiteSetupService } from './site-setup.service.js';
 
-@Module({ imports: [ProductsModule, StationsModule], providers: [SiteSetupService], exports: [SiteSetupService] })
+@Module({
+  imports: [ProductsModule, StationsModule],
+  providers: [SiteSetupService],
+  exports: [SiteSetupService],
+})
 export class SiteSetupModule {}

@@ -14,7 +14,11 @@ import { Instrument } from '../stations/models/instrument.model.js';
 import { Station } from '../stations/models/station.model.js';
 import { StationRegister } from '../stations/station-register.service.js';
 import {
-  type DescribedProduct, type DescribedStage, type DescribedStation, findSiteFaults, type SiteDescription,
+  type DescribedProduct,
+  type DescribedStage,
+  type DescribedStation,
+  findSiteFaults,
+  type SiteDescription,
 } from './site-description.js';
 
 /**
@@ -49,40 +53,89 @@ export class SiteSetupService {
     return report;
   }
 
-  private async addProduct(transaction: Transaction, described: DescribedProduct, actor: string): Promise<string> {
+  private async addProduct(
+    transaction: Transaction,
+    described: DescribedProduct,
+    actor: string,
+  ): Promise<string> {
     const { stages, goldenUnits = [], hasEmitterResistors = false, ...columns } = described;
     const { partNumber } = described;
-    if ((await Product.count({ where: { partNumber }, transaction })) > 0) return `product ${partNumber}: exists, left as it is`;
-    const product = await Product.create({ ...columns, hasEmitterResistors, createdAt: this.now() }, { transaction });
-    for (const [index, stage] of stages.entries()) await this.addStage(transaction, product.productId, index + 1, stage, actor);
-    await GoldenUnit.bulkCreate(goldenUnits.map((unit) => ({ ...unit, productId: product.productId })), { transaction });
+    if ((await Product.count({ where: { partNumber }, transaction })) > 0)
+      return `product ${partNumber}: exists, left as it is`;
+    const product = await Product.create(
+      { ...columns, hasEmitterResistors, createdAt: this.now() },
+      { transaction },
+    );
+    for (const [index, stage] of stages.entries())
+      await this.addStage(transaction, product.productId, index + 1, stage, actor);
+    await GoldenUnit.bulkCreate(
+      goldenUnits.map((unit) => ({ ...unit, productId: product.productId })),
+      { transaction },
+    );
     await this.audit.record(transaction, {
-      actor, action: 'product.created', subject: partNumber, detail: `stages ${stages.map((stage) => stage.stage).join(', ')}, first limits released`,
+      actor,
+      action: 'product.created',
+      subject: partNumber,
+      detail: `stages ${stages.map((stage) => stage.stage).join(', ')}, first limits released`,
     });
     return `product ${partNumber}: added with ${stages.length} stage(s), limit set 1 released`;
   }
 
-  private async addStage(transaction: Transaction, productId: number, position: number, described: DescribedStage, actor: string): Promise<void> {
+  private async addStage(
+    transaction: Transaction,
+    productId: number,
+    position: number,
+    described: DescribedStage,
+    actor: string,
+  ): Promise<void> {
     const { stage: name, maxAttempts, yieldTarget = null, testPlan, limits } = described;
     const releasedAt = this.now();
     const effectiveAt = described.effectiveAt === undefined ? releasedAt : Date.parse(described.effectiveAt);
-    const { stageId } = await Stage.create({ productId, name, position, maxAttempts, yieldTarget }, { transaction });
+    const { stageId } = await Stage.create(
+      { productId, name, position, maxAttempts, yieldTarget },
+      { transaction },
+    );
     await TestPlan.create(
       {
-        stageId, version: 1, releasedAt, effectiveAt, loadVolts: testPlan.loadVolts, referenceVolts: testPlan.referenceVolts,
-        dwellMs: testPlan.dwellMs ?? 0, repeatFirst: testPlan.repeatFirst ?? false, upAndDown: testPlan.upAndDown ?? false,
+        stageId,
+        version: 1,
+        releasedAt,
+        effectiveAt,
+        loadVolts: testPlan.loadVolts,
+        referenceVolts: testPlan.referenceVolts,
+        dwellMs: testPlan.dwellMs ?? 0,
+        repeatFirst: testPlan.repeatFirst ?? false,
+        upAndDown: testPlan.upAndDown ?? false,
       },
       { transaction },
     );
-    const complete = limits.map(({ measure, lower = null, upper = null, rule = 'guarded', guardFactor = 1, adequacyRatio }) => ({
-      measure, lower, upper, rule, guardFactor, ...(adequacyRatio === undefined ? {} : { adequacyRatio }),
-    }));
-    await LimitSet.create({ stageId, version: 1, releasedAt, effectiveAt, releasedBy: actor, limits: complete }, { transaction });
+    const complete = limits.map(
+      ({ measure, lower = null, upper = null, rule = 'guarded', guardFactor = 1, adequacyRatio }) => ({
+        measure,
+        lower,
+        upper,
+        rule,
+        guardFactor,
+        ...(adequacyRatio === undefined ? {} : { adequacyRatio }),
+      }),
+    );
+    await LimitSet.create(
+      { stageId, version: 1, releasedAt, effectiveAt, releasedBy: actor, limits: complete },
+      { transaction },
+    );
   }
 
-  private async addStation(transaction: Transaction, { station: name, line, instruments = [] }: DescribedStation, actor: string): Promise<string> {
-    if ((await Station.count({ where: { name }, transaction })) > 0) return `station ${name}: exists, left as it is`;
-    const { stationId } = await Station.create({ name, line, active: true, createdAt: this.now() }, { transaction });
+  private async addStation(
+    transaction: Transaction,
+    { station: name, line, instruments = [] }: DescribedStation,
+    actor: string,
+  ): Promise<string> {
+    if ((await Station.count({ where: { name }, transaction })) > 0)
+      return `station ${name}: exists, left as it is`;
+    const { stationId } = await Station.create(
+      { name, line, active: true, createdAt: this.now() },
+      { transaction },
+    );
     for (const instrument of instruments) {
       const { kind, serialNumber } = instrument;
       if ((await Instrument.count({ where: { kind, serialNumber }, transaction })) > 0) continue;
