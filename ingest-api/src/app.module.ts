@@ -1,5 +1,4 @@
 import { type DynamicModule, Module } from '@nestjs/common';
-import { APP_GUARD } from '@nestjs/core';
 import { ScheduleModule } from '@nestjs/schedule';
 import { ThrottlerModule } from '@nestjs/throttler';
 import { LoggerModule } from 'nestjs-pino';
@@ -12,7 +11,6 @@ import type { Env } from './config/env.js';
 import { loggerOptions } from './config/logger-options.js';
 import { DatabaseModule } from './database/database.module.js';
 import { IntakeModule } from './intake/intake.module.js';
-import { KeyThrottlerGuard } from './intake/key-throttler.guard.js';
 import { LiveModule } from './live/live.module.js';
 import { LocalMailboxModule } from './local-mailbox/local-mailbox.module.js';
 import { MailModule } from './mail/mail.module.js';
@@ -53,8 +51,6 @@ export class AppModule {
         SiteModule,
         SiteSetupModule,
       ],
-      // After the access guard, which AuthModule brings: it counts by the key that guard found.
-      providers: [{ provide: APP_GUARD, useClass: KeyThrottlerGuard }],
     };
   }
 }

@@ -16,6 +16,8 @@ export function configureApp(app: INestApplication): void {
   const json = express.json({ limit: '100kb', strict: true });
   (app as NestExpressApplication).disable('x-powered-by');
   (app as NestExpressApplication).set('query parser', 'simple');
+  // A reverse proxy on this machine names the caller's address.
+  (app as NestExpressApplication).set('trust proxy', 'loopback');
   app.use(helmet({ contentSecurityPolicy: { directives: contentSources }, strictTransportSecurity: false }));
   app.use(compression());
   app.use(cookieParser());
