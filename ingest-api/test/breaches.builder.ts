@@ -1,8 +1,15 @@
 import { randomUUID } from 'node:crypto';
 import type { INestApplicationContext } from '@nestjs/common';
-import type { Transaction } from 'sequelize';
+import { Op, type Transaction } from 'sequelize';
 import type { MeasureJudgement, MeasureName } from '../src/analysis/analysis.types.js';
 import { BreachRecorder, type FailedResult, type RecordedBreach } from '../src/breaches/breach-recorder.js';
+import { BreachEvent } from '../src/breaches/models/breach-event.model.js';
+import { Breach } from '../src/breaches/models/breach.model.js';
+import { roles } from '../src/auth/roles.js';
+import { OutboxMail } from '../src/mail/models/outbox-mail.model.js';
+import { Outbox } from '../src/mail/outbox.js';
+import { User } from '../src/users/models/user.model.js';
+import { emailOf, startOfTest, type TestApp } from './create-test-app.js';
 import { Writer } from '../src/database/writer.js';
 import { Result } from '../src/results/models/result.model.js';
 import { Unit } from '../src/results/models/unit.model.js';
@@ -56,6 +63,17 @@ export async function storeFails(
   });
   recorder.afterCommit(recorded);
   return recorded;
+}
+
+/** Back to a line without breaches and mails, with the accounts of `createTestApp` alone. */
+export async function clearBreaches({ app, clock }: TestApp): Promise<void> {
+  // A delivery that a breach started on its own would otherwise run on into the next test.
+  await app.get(Outbox).deliverDue();
+  clock.now = startOfTest;
+  await app.get(Writer).run(async (transaction) => {
+    for (const model of [OutboxMail, BreachEvent, Breach]) await model.destroy({ where: {}, transaction });
+    await User.destroy({ where: { email: { [Op.notIn]: roles.map(emailOf) } }, transaction });
+  });
 }
 
 async function storeResult(transaction: Transaction, wish: FailWish): Promise<FailedResult> {

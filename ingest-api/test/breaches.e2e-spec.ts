@@ -6,7 +6,7 @@ import { Writer } from '../src/database/writer.js';
 import { OutboxMail } from '../src/mail/models/outbox-mail.model.js';
 import { Result } from '../src/results/models/result.model.js';
 import { addAccount } from './accounts.builder.js';
-import { storeFails } from './breaches.builder.js';
+import { clearBreaches, storeFails } from './breaches.builder.js';
 import { aFailingResult } from './builders.js';
 import { createTestApp, emailOf, type TestApp } from './create-test-app.js';
 
@@ -17,11 +17,13 @@ describe('breaches', () => {
   let test: TestApp;
   let lead: TestAgent;
 
-  beforeEach(async () => {
+  beforeAll(async () => {
     test = await createTestApp();
     lead = await test.as('qualityLead');
   });
-  afterEach(() => test.close());
+  beforeEach(() => clearBreaches(test));
+  afterEach(() => jest.restoreAllMocks());
+  afterAll(() => test.close());
 
   const fails = (...wishes: Parameters<typeof storeFails>[2]) => storeFails(test.app, test.clock.now, wishes);
   const get = async (path: string) => (await lead.get(`/api/v1${path}`).expect(200)).body;
@@ -130,12 +132,17 @@ describe('breaches', () => {
     it('stores neither result nor breach nor mail when the transaction fails', async () => {
       const recorder = test.app.get(BreachRecorder, { strict: false });
       const record = recorder.record.bind(recorder);
+      const results = await Result.count();
       jest.spyOn(recorder, 'record').mockImplementation(async (...args) => {
         await record(...args);
         throw new Error('the last insert failed');
       });
       await expect(fails({})).rejects.toThrow('the last insert failed');
-      expect(await Promise.all([Result.count(), Breach.count(), OutboxMail.count()])).toEqual([0, 0, 0]);
+      expect(await Promise.all([Result.count(), Breach.count(), OutboxMail.count()])).toEqual([
+        results,
+        0,
+        0,
+      ]);
     });
 
     it('needs a fixed number of statements, however many fail', async () => {
@@ -226,16 +233,17 @@ describe('breaches', () => {
       await close(1).expect(200);
       const trail = await AuditEntry.findAll({
         where: { subject: 'breach 1' },
-        order: [['auditEntryId', 'ASC']],
+        order: [['auditEntryId', 'DESC']],
+        limit: 2,
         raw: true,
       });
       expect(trail).toMatchObject([
-        { actor: qualityLead, action: 'breach.acknowledged', detail: 'on it' },
         {
           actor: qualityLead,
           action: 'breach.closed',
           detail: 'Cause: low Early voltage Action: reel returned',
         },
+        { actor: qualityLead, action: 'breach.acknowledged', detail: 'on it' },
       ]);
     });
 

@@ -9,10 +9,13 @@ describe('the live stream', () => {
 
   beforeEach(async () => {
     test = await createTestApp();
+    stopped = null;
   });
-  afterEach(() => test.close());
+  afterEach(() => stop());
 
-  const server = () => test.app.getHttpServer() as Server;
+  let stopped: Promise<void> | null = null;
+  const stop = () => (stopped ??= test.close());
+  const server = (): Server => test.app.getHttpServer();
   const signedIn = () => signIn(server(), emailOf('viewer'), testPassword);
 
   async function follow(headers: Record<string, string>): Promise<Response> {
@@ -52,6 +55,6 @@ describe('the live stream', () => {
   it('ends when the server stops', async () => {
     const readUntil = reading(await follow(await signedIn()));
     await readUntil('event: ping');
-    await Promise.all([test.close(), expect(readUntil('event: never')).rejects.toThrow('The stream ended')]);
+    await Promise.all([stop(), expect(readUntil('event: never')).rejects.toThrow('The stream ended')]);
   });
 });

@@ -44,6 +44,15 @@ export class FaultySmtpServer {
     if (server !== null) await new Promise<void>((resolve) => server.close(resolve));
   }
 
+  /** As new, on the same port. */
+  async restart(port: number): Promise<void> {
+    await this.close();
+    this.received.length = 0;
+    this.data.length = 0;
+    this.rcpt = {};
+    await this.listen(port);
+  }
+
   private reply(to: string, source: string, callback: (error?: Error | null) => void): void {
     const reply = this.data.shift() ?? 'take';
     if (typeof reply === 'string') {

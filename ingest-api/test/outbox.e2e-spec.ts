@@ -2,7 +2,7 @@ import { Writer } from '../src/database/writer.js';
 import { OutboxMail } from '../src/mail/models/outbox-mail.model.js';
 import { Outbox } from '../src/mail/outbox.js';
 import { addAccount } from './accounts.builder.js';
-import { storeFails } from './breaches.builder.js';
+import { clearBreaches, storeFails } from './breaches.builder.js';
 import { createTestApp, emailOf, type TestApp } from './create-test-app.js';
 import { FaultySmtpServer } from './outbox-smtp-server.js';
 
@@ -16,17 +16,21 @@ describe('the outbox', () => {
   let test: TestApp;
   let outbox: Outbox;
 
-  beforeEach(async () => {
+  beforeAll(async () => {
     smtp = new FaultySmtpServer();
     port = await smtp.listen();
     test = await createTestApp({
       AMPKEEP_MAIL_TRANSPORT: 'smtp',
       AMPKEEP_SMTP_URL: `smtp://127.0.0.1:${port}`,
-      AMPKEEP_PUBLIC_URL: 'https://ampkeep.fernhollow.example',
+      AMPKEEP_PUBLIC_URL: 'http://ampkeep.site.example',
     });
     outbox = test.app.get(Outbox);
   });
-  afterEach(async () => {
+  beforeEach(async () => {
+    await clearBreaches(test);
+    await smtp.restart(port);
+  });
+  afterAll(async () => {
     await test.close();
     await smtp.close();
   });
@@ -52,7 +56,7 @@ describe('the outbox', () => {
       sentAt: Date.parse('2026-11-30T12:00:00Z'),
       lastError: null,
     });
-    expect(mail.messageId).toMatch(/@ampkeep\.fernhollow\.example>$/);
+    expect(mail.messageId).toMatch(/@ampkeep\.site\.example>$/);
   });
 
   it('sends again after a passing refusal, with the same Message-ID', async () => {
