@@ -1,20 +1,29 @@
 /**
- * Sum of the numbers with a running correction for the digits an addition loses (Neumaier's form of
- * compensated summation). The error is about one rounding of the result, however many numbers there are,
- * unless they cancel almost completely. The sum of no numbers is 0.
+ * A running sum that keeps the digits an addition loses (Neumaier's form of compensated summation). The error is
+ * about one rounding of the result, however many numbers there are, unless they cancel almost completely.
  *
- * Source: A. Neumaier, Z. Angew. Math. Mech. 54 (1974) 39 (from memory). Cost: linear.
+ * Source: A. Neumaier, Z. Angew. Math. Mech. 54 (1974) 39 (from memory).
  */
-export function compensatedSum(values: ArrayLike<number>): number {
-  let sum = 0;
-  let lost = 0;
-  for (let i = 0; i < values.length; i++) {
-    const value = values[i]!;
-    const next = sum + value;
-    lost += Math.abs(sum) >= Math.abs(value) ? sum - next + value : value - next + sum;
-    sum = next;
+export class CompensatedSum {
+  private sum = 0;
+  private lost = 0;
+
+  add(value: number): void {
+    const next = this.sum + value;
+    this.lost += Math.abs(this.sum) >= Math.abs(value) ? this.sum - next + value : value - next + this.sum;
+    this.sum = next;
   }
-  return sum + lost;
+
+  get total(): number {
+    return this.sum + this.lost;
+  }
+}
+
+/** Compensated sum of the numbers; the sum of no numbers is 0. Cost: linear. */
+export function compensatedSum(values: ArrayLike<number>): number {
+  const sum = new CompensatedSum();
+  for (let i = 0; i < values.length; i++) sum.add(values[i]!);
+  return sum.total;
 }
 
 /** Compensated arithmetic mean; throws a RangeError when there are no numbers. */

@@ -1,4 +1,4 @@
-import { compensatedMean, compensatedSum } from './compensated-sum.js';
+import { compensatedMean, CompensatedSum } from './compensated-sum.js';
 
 /** A fitted straight line y = intercept + slope·x with what the residuals say about it. */
 export interface StraightLine {
@@ -45,14 +45,10 @@ export function fitLine(x: ArrayLike<number>, y: ArrayLike<number>): StraightLin
   if (n < 3) throw new RangeError('fitLine requires at least three points');
   const meanX = compensatedMean(x);
   const meanY = compensatedMean(y);
-  const dx = centred(x, meanX);
-  const dy = centred(y, meanY);
-  const sxx = sumOfProducts(dx, dx);
+  const { sxx, sxy, syy } = productsAbout(meanX, meanY, x, y);
   if (!(sxx > 0)) throw new RangeError('fitLine requires at least two different x');
-  const slope = sumOfProducts(dx, dy) / sxx;
-  const residuals = residualsOf(dx, dy, slope);
-  const residualSumOfSquares = sumOfProducts(residuals, residuals);
-  const totalSumOfSquares = sumOfProducts(dy, dy);
+  const slope = sxy / sxx;
+  const { residualSumOfSquares, largestResidual } = residualsAbout(meanX, meanY, slope, x, y);
   const residualStdDev = Math.sqrt(residualSumOfSquares / (n - 2));
   return {
     intercept: meanY - slope * meanX,
@@ -61,9 +57,9 @@ export function fitLine(x: ArrayLike<number>, y: ArrayLike<number>): StraightLin
     slopeStdError: residualStdDev / Math.sqrt(sxx),
     correlation: -meanX / Math.sqrt(sxx / n + meanX * meanX),
     residualStdDev,
-    rSquared: totalSumOfSquares > 0 ? 1 - residualSumOfSquares / totalSumOfSquares : 1,
+    rSquared: syy > 0 ? 1 - residualSumOfSquares / syy : 1,
     degreesOfFreedom: n - 2,
-    largestResidual: largestMagnitude(residuals),
+    largestResidual,
     count: n,
     meanX,
     sxx,
@@ -72,26 +68,33 @@ export function fitLine(x: ArrayLike<number>, y: ArrayLike<number>): StraightLin
   };
 }
 
-function centred(values: ArrayLike<number>, mean: number): Float64Array {
-  const out = new Float64Array(values.length);
-  for (let i = 0; i < out.length; i++) out[i] = values[i]! - mean;
-  return out;
+function productsAbout(meanX: number, meanY: number, x: ArrayLike<number>, y: ArrayLike<number>) {
+  const sxx = new CompensatedSum();
+  const sxy = new CompensatedSum();
+  const syy = new CompensatedSum();
+  for (let i = 0; i < x.length; i++) {
+    const dx = x[i]! - meanX;
+    const dy = y[i]! - meanY;
+    sxx.add(dx * dx);
+    sxy.add(dx * dy);
+    syy.add(dy * dy);
+  }
+  return { sxx: sxx.total, sxy: sxy.total, syy: syy.total };
 }
 
-function residualsOf(dx: Float64Array, dy: Float64Array, slope: number): Float64Array {
-  const out = new Float64Array(dx.length);
-  for (let i = 0; i < out.length; i++) out[i] = dy[i]! - slope * dx[i]!;
-  return out;
-}
-
-function sumOfProducts(a: Float64Array, b: Float64Array): number {
-  const products = new Float64Array(a.length);
-  for (let i = 0; i < a.length; i++) products[i] = a[i]! * b[i]!;
-  return compensatedSum(products);
-}
-
-function largestMagnitude(values: Float64Array): number {
-  let largest = 0;
-  for (let i = 0; i < values.length; i++) largest = Math.max(largest, Math.abs(values[i]!));
-  return largest;
+function residualsAbout(
+  meanX: number,
+  meanY: number,
+  slope: number,
+  x: ArrayLike<number>,
+  y: ArrayLike<number>,
+) {
+  const squares = new CompensatedSum();
+  let largestResidual = 0;
+  for (let i = 0; i < x.length; i++) {
+    const residual = y[i]! - meanY - slope * (x[i]! - meanX);
+    squares.add(residual * residual);
+    largestResidual = Math.max(largestResidual, Math.abs(residual));
+  }
+  return { residualSumOfSquares: squares.total, largestResidual };
 }

@@ -27,6 +27,7 @@ export function theilSenLine(x: ArrayLike<number>, y: ArrayLike<number>): Robust
   }
   if (count === 0) throw new RangeError('theilSenLine requires at least two different x');
   const slope = medianInPlace(slopes, count);
-  const offsets = Float64Array.from({ length: n }, (_, i) => y[i]! - slope * x[i]!);
+  const offsets = new Float64Array(n);
+  for (let i = 0; i < n; i++) offsets[i] = y[i]! - slope * x[i]!;
   return { intercept: medianInPlace(offsets), slope };
 }

@@ -1,4 +1,4 @@
-import type { LineFit, Measure, PreparedPoint, SweepAnalysis, SweepInput } from '../analysis.types.js';
+import type { LineFit, Measure, SweepAnalysis, SweepInput } from '../analysis.types.js';
 import { outputImpedance } from '../uncertainty/output-impedance.js';
 import { slopeUncertainty } from '../uncertainty/slope-uncertainty.js';
 import { chooseFitPoints } from './choose-fit-points.js';
@@ -82,18 +82,14 @@ function addImpedance(findings: SweepFindings): void {
   if (fit === null || findings.slopeReason !== null) return;
   findings.slopeUncertainty = slopeUncertainty({
     fit,
-    volts: column(fitted, 'loadVolts'),
-    amps: column(fitted, 'outputAmps'),
+    volts: fitted.map((point) => point.loadVolts),
+    amps: fitted.map((point) => point.outputAmps),
     sameVolts: findings.sameVolts,
     resolutionAmps: findings.resolutionAmps,
     readingAccuracyPercent: input.ammeter.readingAccuracyPercent ?? 0,
     driftAmps: repeated === null ? null : driftAmps(repeated, fit.slopeSiemens),
   });
   findings.impedance = outputImpedance(fit.slopeSiemens, findings.slopeUncertainty.expanded);
-}
-
-function column(points: readonly PreparedPoint[], name: 'loadVolts' | 'outputAmps'): Float64Array {
-  return Float64Array.from(points, (point) => point[name]);
 }
 
 function measuresOf(findings: SweepFindings): Measure[] {

@@ -50,13 +50,13 @@ export function findCurvature(
 
 /** V² made orthogonal to 1 and V, scaled by the span so that its size is about 1. */
 function orthogonalQuadratic(points: readonly PreparedPoint[]): {
-  shape: Float64Array;
+  shape: number[];
   sumOfSquares: number;
 } {
   const n = points.length;
   const low = points[0]?.loadVolts ?? 0;
   const span = (points.at(-1)?.loadVolts ?? 0) - low || 1;
-  const x = Float64Array.from(points, (point) => (point.loadVolts - low) / span);
+  const x = points.map((point) => (point.loadVolts - low) / span);
   const meanX = x.reduce((sum, value) => sum + value, 0) / n;
   const d = x.map((value) => value - meanX);
   const s2 = d.reduce((sum, value) => sum + value * value, 0);

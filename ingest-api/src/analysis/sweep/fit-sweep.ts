@@ -24,13 +24,13 @@ export interface SweepFit {
  * @returns fit null with fewer than 3 load steps
  */
 export function fitSweep(points: readonly PreparedPoint[], sameVolts: number): SweepFit {
-  const volts = Float64Array.from(points, (point) => point.loadVolts);
+  const volts = points.map((point) => point.loadVolts);
   const steps = countSteps(volts, sameVolts);
   const carrying = points.filter((point) => (point.outputAmpsStdDev ?? 0) > 0).length;
   const weighted = carrying > 0 && carrying === points.length;
   const weightsUnused = !weighted && points.some((point) => point.outputAmpsStdDev !== null);
   if (steps < FEWEST_STEPS) return { fit: null, steps, weightsUnused };
-  const amps = Float64Array.from(points, (point) => point.outputAmps);
+  const amps = points.map((point) => point.outputAmps);
   const line = weighted
     ? fitWeightedLine(
         volts,

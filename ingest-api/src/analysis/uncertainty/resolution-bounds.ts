@@ -24,8 +24,8 @@ export interface SlopeBounds {
  * @returns null when no pair is left. Cost: quadratic (500 points: 124,750 pairs).
  */
 export function slopeBounds(
-  volts: Float64Array,
-  amps: Float64Array,
+  volts: ArrayLike<number>,
+  amps: ArrayLike<number>,
   resolutionAmps: number,
   sameVolts: number,
 ): SlopeBounds | null {
@@ -39,10 +39,9 @@ export function slopeBounds(
       const run = volts[j]! - fromVolts;
       if (run <= sameVolts) continue;
       const rise = amps[j]! - fromAmps;
-      const low = (rise - slack) / run;
-      const high = (rise + slack) / run;
-      if (low > lowest) lowest = low;
-      if (high < highest) highest = high;
+      // Multiplied, not divided: a division per pair would double the cost of a long sweep.
+      if (rise - slack > lowest * run) lowest = (rise - slack) / run;
+      if (rise + slack < highest * run) highest = (rise + slack) / run;
     }
   }
   return lowest === -Infinity ? null : { lowest, highest };

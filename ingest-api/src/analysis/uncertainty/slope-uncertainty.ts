@@ -5,8 +5,8 @@ import { resolutionUncertainty, slopeBounds } from './resolution-bounds.js';
 export interface SlopeEvidence {
   fit: LineFit;
   /** Load voltages of the fitted points, ascending, and their currents. */
-  volts: Float64Array;
-  amps: Float64Array;
+  volts: ArrayLike<number>;
+  amps: ArrayLike<number>;
   /** Voltages within this tolerance are one load step. */
   sameVolts: number;
   resolutionAmps: number;
