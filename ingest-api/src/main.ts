@@ -1,6 +1,7 @@
 import 'reflect-metadata';
 import type { Server } from 'node:http';
 import { BadSettingsError, type Env, readEnv } from './config/env.js';
+import { loadEnvFile } from './config/load-env-file.js';
 import { createApp } from './create-app.js';
 import { NewerDatabaseError } from './database/migrator.js';
 import {
@@ -29,6 +30,7 @@ async function serve(env: Env): Promise<void> {
 
 async function main(): Promise<void> {
   try {
+    loadEnvFile();
     await serve(readEnv(process.env));
   } catch (error) {
     const expected =

@@ -2,6 +2,7 @@ import 'reflect-metadata';
 import { readFileSync } from 'node:fs';
 import { AmpkeepError } from '../common/errors.js';
 import { BadSettingsError, readEnv } from '../config/env.js';
+import { loadEnvFile } from '../config/load-env-file.js';
 import { createApp } from '../create-app.js';
 import { SiteSetupService } from '../site-setup/site-setup.service.js';
 import { AccountsNotReadyError, refuseDemoAccounts } from '../users/first-administrator.js';
@@ -14,6 +15,7 @@ async function main(file: string | undefined): Promise<void> {
     return;
   }
   const description = JSON.parse(readFileSync(file, 'utf8')) as unknown;
+  loadEnvFile();
   const env = readEnv({ AMPKEEP_LOG_LEVEL: 'error', ...process.env });
   const app = await createApp(env);
   try {
