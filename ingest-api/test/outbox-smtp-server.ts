@@ -1,10 +1,10 @@
-import { once } from 'node:events';
+import { EventEmitter, once } from 'node:events';
 import type { AddressInfo, Socket } from 'node:net';
 import { text } from 'node:stream/consumers';
 import { SMTPServer } from 'smtp-server';
 
-/** `take`, `drop` (take it, then cut the line before the reply), or an SMTP reply code to refuse with. */
-export type Reply = 'take' | 'drop' | number;
+/** `take`, `drop` (take it, then cut the line before the reply), `hang`, or an SMTP reply code to refuse with. */
+export type Reply = 'take' | 'drop' | 'hang' | number;
 
 interface Received {
   to: string;
@@ -16,6 +16,7 @@ export class FaultySmtpServer {
   readonly received: Received[] = [];
   rcpt: Record<string, Reply> = {};
   readonly data: Reply[] = [];
+  private readonly arrivals = new EventEmitter();
   private server: SMTPServer | null = null;
   private readonly sockets = new Set<Socket>();
 
@@ -24,7 +25,10 @@ export class FaultySmtpServer {
       disabledCommands: ['AUTH', 'STARTTLS'],
       disableReverseLookup: true,
       closeTimeout: 1,
-      onRcptTo: ({ address }, _session, callback) => callback(refusal(this.rcpt[address] ?? 'take')),
+      onRcptTo: ({ address }, _session, callback) => {
+        const reply = this.rcpt[address] ?? 'take';
+        if (reply !== 'hang') callback(refusal(reply));
+      },
       onData: (stream, session, callback) => {
         const [recipient] = session.envelope.rcptTo;
         void text(stream).then((source) => this.reply(recipient!.address, source, callback));
@@ -44,6 +48,11 @@ export class FaultySmtpServer {
     if (server !== null) await new Promise<void>((resolve) => server.close(resolve));
   }
 
+  /** Resolves once it has taken so many mails. */
+  async hasTaken(count: number): Promise<void> {
+    while (this.received.length < count) await once(this.arrivals, 'mail');
+  }
+
   /** As new, on the same port. */
   async restart(port: number): Promise<void> {
     await this.close();
@@ -57,6 +66,7 @@ export class FaultySmtpServer {
     const reply = this.data.shift() ?? 'take';
     if (typeof reply === 'string') {
       this.received.push({ to, messageId: /^Message-ID: (.*)$/im.exec(source)![1]!.trim() });
+      this.arrivals.emit('mail');
     }
     if (reply === 'drop') this.sockets.forEach((socket) => socket.destroy());
     else callback(refusal(reply));

@@ -125,6 +125,19 @@ describe('the outbox', () => {
     expect((await mailTo(lead)).state).toBe('waiting');
   });
 
+  it('lets a mail that hangs hold up neither its neighbours nor later ones', async () => {
+    await addAccount(test.app, { role: 'qualityLead', email: deputy });
+    smtp.rcpt = { [lead]: 'hang' };
+    await fail(1);
+    await smtp.hasTaken(1);
+    await fail(2);
+    await smtp.hasTaken(2);
+    expect(smtp.received.map(({ to }) => to)).toEqual([deputy, deputy]);
+    await smtp.close();
+    await deliver();
+    expect(await OutboxMail.count({ where: { recipient: lead, state: 'waiting' } })).toBe(2);
+  });
+
   it('sends twice with one Message-ID when the line breaks between the end of DATA and the reply', async () => {
     smtp.data.push('drop');
     await fail();

@@ -29,8 +29,8 @@ import { GIVE_UP_AFTER_DAYS, isGivenUp, pauseBeforeRetry } from './retry-pause.j
 
 const LOOK_EVERY_MS = 5000;
 const SHUTDOWN_WAIT_MS = 3000;
-/** Sent side by side, so that a hanging one doesn't keep the others waiting. */
-const SIDE_BY_SIDE = 8;
+/** Sent side by side: a mail that hangs takes up one place and keeps no other waiting. */
+const SIDE_BY_SIDE = 16;
 /** Longer than any sending takes: nobody takes a mail that is still on its way. */
 const CLAIM_MS = 2 * LONGEST_SEND_MS;
 
@@ -41,8 +41,9 @@ const CLAIM_MS = 2 * LONGEST_SEND_MS;
 @Injectable()
 export class Outbox implements OnApplicationBootstrap, OnModuleDestroy, BeforeApplicationShutdown {
   private readonly logger = new Logger(Outbox.name);
-  private current: Promise<void> = Promise.resolve();
-  private next: Promise<void> | null = null;
+  private readonly underWay = new Set<Promise<void>>();
+  private starting: Promise<void> = Promise.resolve();
+  private nextStart: Promise<void> | null = null;
   private timer: NodeJS.Timeout | null = null;
   private stopping = false;
 
@@ -61,19 +62,16 @@ export class Outbox implements OnApplicationBootstrap, OnModuleDestroy, BeforeAp
 
   /** Says that a mail was committed, so that it leaves now and not at the next look. */
   wake(): void {
-    void this.deliverDue();
+    void this.startDue();
   }
 
-  /** Sends all mails that are due, after a run that is under way. Never rejects: faults stand with the mails and in the log. */
-  deliverDue(): Promise<void> {
-    this.next ??= this.current.then(() => {
-      this.next = null;
-      this.current = this.deliverAll().catch((error: unknown) => {
-        this.logger.error({ err: error }, 'The outbox could not be worked through; it is looked at again');
-      });
-      return this.current;
-    });
-    return this.next;
+  /** Resolves when all that is due was tried. Never rejects: faults stand with the mails and in the log. */
+  async deliverDue(): Promise<void> {
+    await this.startDue();
+    while (this.underWay.size > 0) {
+      await Promise.all(this.underWay);
+      await this.startDue();
+    }
   }
 
   onModuleDestroy(): void {
@@ -83,17 +81,39 @@ export class Outbox implements OnApplicationBootstrap, OnModuleDestroy, BeforeAp
 
   /** Waits a little for mails on their way, so that they are marked before the database closes. */
   async beforeApplicationShutdown(): Promise<void> {
-    await Promise.race([this.current, delay(SHUTDOWN_WAIT_MS, undefined, { ref: false })]);
+    await Promise.race([Promise.all(this.underWay), delay(SHUTDOWN_WAIT_MS, undefined, { ref: false })]);
   }
 
-  private async deliverAll(): Promise<void> {
-    while (!this.stopping && (await hasDueMail(this.clock()))) {
+  /** One at a time; whoever asks while one runs shares the next, which sees what was committed since. */
+  private startDue(): Promise<void> {
+    this.nextStart ??= this.starting.then(() => {
+      this.nextStart = null;
+      this.starting = this.claimAndStart().catch((error: unknown) => {
+        this.logger.error({ err: error }, 'The outbox could not be worked through; it is looked at again');
+      });
+      return this.starting;
+    });
+    return this.nextStart;
+  }
+
+  /** Fills the free places; each mail that is done with makes room for the next. */
+  private async claimAndStart(): Promise<void> {
+    while (!this.stopping && this.underWay.size < SIDE_BY_SIDE && (await hasDueMail(this.clock()))) {
       const now = this.clock();
+      const free = SIDE_BY_SIDE - this.underWay.size;
       const claimed = await this.writer.run((transaction) =>
-        claimDueMails(transaction, now, now + CLAIM_MS, SIDE_BY_SIDE),
+        claimDueMails(transaction, now, now + CLAIM_MS, free),
       );
-      await Promise.all(claimed.map((mail) => this.deliver(mail)));
+      for (const mail of claimed) this.start(mail);
     }
+  }
+
+  private start(mail: ClaimedMail): void {
+    const delivery = this.deliver(mail).finally(() => {
+      this.underWay.delete(delivery);
+      this.wake();
+    });
+    this.underWay.add(delivery);
   }
 
   private async deliver(mail: ClaimedMail): Promise<void> {
