@@ -1,12 +1,14 @@
 import type { ComplianceFinding, PreparedPoint, ProductSpec } from '../analysis.types.js';
-import { theilSenLine, type RobustLine } from '../statistics/theil-sen.js';
-import { endTolerance, promisedSpan, sameVoltageWithin } from './same-voltage.js';
-
-/** A seed line is drawn through no fewer points than this. */
-const FEWEST_SEED_POINTS = 4;
-
-/** Below this share of the nominal current the unit delivers nothing, whatever its seed line says. */
-export const NO_CURRENT_SHARE = 0.1;
+import type { RobustLine } from '../statistics/theil-sen.js';
+import { endTolerance, sameVoltageWithin } from './same-voltage.js';
+import {
+  isOutside,
+  NO_CURRENT_SHARE,
+  seedCurrent,
+  seedLine,
+  tightenedSeed,
+  type SeedLine,
+} from './seed-line.js';
 
 export interface ComplianceSearch {
   /** What is told; its `fitHighVolts` is the limit below, kept within the promised range. */
@@ -37,6 +39,8 @@ export interface ToleranceCrossing {
  * With fewer than 4 points in the lower half no knee is claimed. The absence of one is still proven when all
  * currents lie within τ of the largest.
  *
+ * A knee in the lower half bends the seed line itself; then a line through the points below that knee finds it.
+ *
  * When the compliance voltage is short of V_hi the fit ends one load step below the last inside point and serves
  * diagnosis only; a knee above V_hi merely keeps the points beyond it out.
  *
@@ -58,26 +62,27 @@ export function findCompliance(points: readonly PreparedPoint[], product: Produc
       ? heldUpTo(highest, product)
       : untold('fewPoints', product);
   }
+  const early = earlyKnee(tested, seed, product);
+  if (early !== null) return early;
   const knee = kneeIndex(tested, seed, product);
   return knee === null ? heldUpTo(highest, product) : shortAt(tested, knee, seed, product);
+}
+
+/** A knee among the seed's own points, found by a seed line drawn below it; null when there is none. */
+function earlyKnee(
+  points: readonly PreparedPoint[],
+  seed: SeedLine,
+  product: ProductSpec,
+): ComplianceSearch | null {
+  const tightened = tightenedSeed(seed, product);
+  if (tightened === null) return null;
+  const knee = kneeIndex(points, tightened, product);
+  return knee !== null && knee < seed.points.length ? shortAt(points, knee, tightened, product) : null;
 }
 
 /** Whether no point carries a tenth of the nominal current. */
 function deliversNothing(points: readonly PreparedPoint[], product: ProductSpec): boolean {
   return points.every((point) => point.outputAmps < NO_CURRENT_SHARE * product.nominalAmps);
-}
-
-function seedLine(points: readonly PreparedPoint[], product: ProductSpec): RobustLine | null {
-  const middle = product.complianceLowVolts + promisedSpan(product) / 2;
-  const lower = points.filter((point) => point.loadVolts <= middle);
-  const first = lower[0];
-  const last = lower.at(-1);
-  if (first === undefined || last === undefined || lower.length < FEWEST_SEED_POINTS) return null;
-  if (last.loadVolts - first.loadVolts <= sameVoltageWithin(product)) return null;
-  return theilSenLine(
-    lower.map((point) => point.loadVolts),
-    lower.map((point) => point.outputAmps),
-  );
 }
 
 function withinToleranceOfLargest(points: readonly PreparedPoint[], product: ProductSpec): boolean {
@@ -92,17 +97,6 @@ function kneeIndex(points: readonly PreparedPoint[], seed: RobustLine, product: 
     if (next === undefined || isOutside(next, seed, product)) return i;
   }
   return null;
-}
-
-function isOutside(point: PreparedPoint, seed: RobustLine, product: ProductSpec): boolean {
-  return (
-    point.outputAmps < NO_CURRENT_SHARE * product.nominalAmps ||
-    point.outputAmps < (1 - product.complianceTolerance) * seedCurrent(seed, point)
-  );
-}
-
-function seedCurrent(seed: RobustLine, point: PreparedPoint): number {
-  return seed.intercept + seed.slope * point.loadVolts;
 }
 
 function shortAt(

@@ -1,8 +1,8 @@
 import type { LineFit, Measure } from '../analysis.types.js';
 import { tQuantile } from '../distributions/student-t.js';
 import { currentAt } from './current-at.js';
-import { NO_CURRENT_SHARE } from './find-compliance.js';
 import { absentMeasure, exactMeasure } from './measure.js';
+import { NO_CURRENT_SHARE } from './seed-line.js';
 import type { SweepFindings } from './sweep-findings.js';
 
 /**
