@@ -4,6 +4,8 @@ module.exports = {
   roots: ['<rootDir>/src', '<rootDir>/test'],
   testRegex: '\\.(spec|e2e-spec)\\.ts$',
   testEnvironment: 'node',
+  // Starting an application takes seconds on a busy machine.
+  testTimeout: 60_000,
   moduleFileExtensions: ['ts', 'js', 'json'],
   moduleNameMapper: { '^(\\.{1,2}/.*)\\.js$': '$1' },
   transform: {
