@@ -1,6 +1,7 @@
 import { createBrowserRouter, type RouteObject } from 'react-router-dom';
 import { NotFound } from '@/components/errors/not-found';
 import { RouteError } from '@/components/errors/route-error';
+import { connectRoutes } from './connect-routes';
 import { SignedInRoute } from './routes/signed-in';
 
 /** Every page is fetched when it is first opened. */
@@ -19,6 +20,12 @@ export const routes: RouteObject[] = [
         ErrorBoundary: RouteError,
         children: [
           { index: true, lazy: async () => ({ Component: (await import('./routes/today')).TodayRoute }) },
+          { path: 'units', lazy: async () => ({ Component: (await import('./routes/units')).UnitsRoute }) },
+          {
+            path: 'units/:partNumber/:serialNumber',
+            lazy: async () => ({ Component: (await import('./routes/unit')).UnitRoute }),
+          },
+          ...connectRoutes,
           { path: '*', Component: NotFound },
         ],
       },

@@ -24,5 +24,5 @@ export const navigation: NavigationGroup[] = [
   },
   { label: 'Learn', entries: [] },
   { label: 'Decide', entries: [] },
-  { label: 'Connect', entries: [] },
+  { label: 'Connect', entries: [{ label: 'Stations', to: paths.stations() }] },
 ];

@@ -10,6 +10,7 @@ export const paths = {
       resultId ? { result: resultId } : {},
     ),
   stations: () => '/stations',
+  station: (station: string) => `/stations/${encodeURIComponent(station)}`,
   breaches: (query: Record<string, string> = {}) => withQuery('/breaches', query),
   breach: (breachId: number) => `/breaches/${breachId}`,
   intake: (query: Record<string, string> = {}) => withQuery('/intake', query),

@@ -5,7 +5,7 @@ import { TimeText } from '@/components/ui/time-text';
 import { paths } from '@/config/paths';
 import { useNow } from '@/lib/now';
 import type { Station } from '@/types/api';
-import { stationsOptions } from '../api/get-stations';
+import { stationsOptions } from '@/lib/get-stations';
 import styles from './line-strip.module.css';
 import { stationTroubles } from './station-trouble';
 

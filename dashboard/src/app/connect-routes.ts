@@ -1,0 +1,13 @@
+import type { RouteObject } from 'react-router-dom';
+
+/** Stations and what comes in from them. */
+export const connectRoutes: RouteObject[] = [
+  {
+    path: 'stations',
+    lazy: async () => ({ Component: (await import('./routes/stations')).StationsRoute }),
+  },
+  {
+    path: 'stations/:station',
+    lazy: async () => ({ Component: (await import('./routes/station')).StationRoute }),
+  },
+];

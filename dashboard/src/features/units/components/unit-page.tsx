@@ -1,0 +1,75 @@
+import { useQueries, useQuery } from '@tanstack/react-query';
+import { useMemo } from 'react';
+import { ErrorState } from '@/components/ui/error-state';
+import { Loading } from '@/components/ui/loading';
+import { Section } from '@/components/ui/section';
+import type { ResultDetail, RunItem, Unit } from '@/types/api';
+import { resultOptions } from '../api/get-result';
+import { AttemptList } from './attempt-list';
+import { MeasureTable } from './measure-table';
+import { RawPost } from './raw-post';
+import { ResultFacts } from './result-facts';
+import { ResultRemarks } from './result-remarks';
+import { SweepFigure } from './sweep-figure';
+import { UnitHead } from './unit-head';
+import styles from './unit-page.module.css';
+
+const MOST_OVERLAID = 3;
+
+export interface UnitPageProps {
+  unit: Unit;
+  shown: RunItem;
+}
+
+export function UnitPage({ unit, shown }: UnitPageProps) {
+  const { data: result, error, refetch } = useQuery(resultOptions(shown.resultId));
+  const earlier = useEarlierResults(unit, shown);
+  return (
+    <>
+      <UnitHead unit={unit} shown={shown} />
+      {result && <ResultRemarks result={result} />}
+      <div className={styles.columns}>
+        <div>
+          {result && <SweepFigure result={result} earlier={earlier} />}
+          {!result && error && <ErrorState error={error} onRetry={() => void refetch()} />}
+          {!result && !error && <Loading label="the sweep" lines={12} />}
+        </div>
+        <div>
+          <Section title="Attempts">
+            <AttemptList unit={unit} shownResultId={shown.resultId} />
+          </Section>
+        </div>
+      </div>
+      {result && <Judging result={result} />}
+    </>
+  );
+}
+
+function Judging({ result }: { result: ResultDetail }) {
+  return (
+    <>
+      <Section
+        title="Judging"
+        note={`${result.stage}, ${result.attempt === null ? 'not counted' : `attempt ${result.attempt}`}`}
+      >
+        <MeasureTable measures={result.measures} />
+      </Section>
+      <Section title="Conditions">
+        <ResultFacts result={result} />
+      </Section>
+      <RawPost resultId={result.resultId} />
+    </>
+  );
+}
+
+/** Results at the same stage before the shown one, at most three, oldest first. */
+function useEarlierResults(unit: Unit, shown: RunItem): ResultDetail[] {
+  const results = unit.stages.find(({ stage }) => stage === shown.stage)?.results ?? [];
+  const before = results.filter(({ startedAt }) => startedAt < shown.startedAt).slice(-MOST_OVERLAID);
+  const queries = useQueries({ queries: before.map(({ resultId }) => resultOptions(resultId)) });
+  const loaded = queries.flatMap(({ data }) => (data ? [data] : []));
+  // A new array in every render would draw the chart anew each time.
+  const key = loaded.map(({ resultId, verdict }) => `${resultId} ${verdict}`).join();
+  // eslint-disable-next-line react-hooks/exhaustive-deps
+  return useMemo(() => loaded, [key]);
+}

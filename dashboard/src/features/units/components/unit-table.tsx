@@ -1,0 +1,99 @@
+import { Link } from 'react-router-dom';
+import { DataTable, type DataColumn } from '@/components/ui/data-table';
+import { Impedance } from '@/components/ui/impedance';
+import { SlopeMark } from '@/components/ui/slope-mark';
+import { TimeText } from '@/components/ui/time-text';
+import { VerdictMark } from '@/components/ui/verdict-mark';
+import { paths } from '@/config/paths';
+import type { UnitItem, UnitStageState } from '@/types/api';
+import styles from './unit-table.module.css';
+
+const columns: DataColumn<UnitItem>[] = [
+  {
+    key: 'unit',
+    head: 'Unit',
+    isRowHead: true,
+    isTight: true,
+    cell: ({ partNumber, serialNumber, latest }) => (
+      <span className={styles.unit}>
+        <SlopeMark slope={latest.slope} size={48} />
+        <Link className="figures" to={paths.unit(partNumber, serialNumber)}>
+          {serialNumber}
+        </Link>
+      </span>
+    ),
+  },
+  {
+    key: 'verdict',
+    head: 'Latest verdict',
+    isTight: true,
+    isSelfExplaining: true,
+    cell: ({ latest }) => <VerdictMark verdict={latest.verdict} />,
+  },
+  {
+    key: 'impedance',
+    head: 'Output impedance',
+    align: 'end',
+    isTight: true,
+    isSelfExplaining: true,
+    cell: ({ latest }) => <Impedance slope={latest.slope} />,
+  },
+  {
+    key: 'part',
+    head: 'Part number',
+    isTight: true,
+    isSelfExplaining: true,
+    cell: ({ partNumber }) => <span className="figures">{partNumber}</span>,
+  },
+  {
+    key: 'lot',
+    head: 'Lot',
+    isTight: true,
+    cell: ({ lot }) => lot && <span className="figures">{lot}</span>,
+  },
+  {
+    key: 'stages',
+    head: 'Stages',
+    isSelfExplaining: true,
+    cell: ({ stages }) => <StageStates stages={stages} />,
+  },
+  {
+    key: 'station',
+    head: 'Station',
+    isTight: true,
+    isSelfExplaining: true,
+    cell: ({ latest }) => latest.station,
+  },
+  {
+    key: 'tested',
+    head: 'Last tested',
+    align: 'end',
+    isTight: true,
+    isSelfExplaining: true,
+    cell: ({ lastTestedAt }) => <TimeText at={lastTestedAt} show="short" />,
+  },
+];
+
+function StageStates({ stages }: { stages: UnitStageState[] }) {
+  return (
+    <span className={styles.stages}>
+      {stages.map(({ stage, attempts, verdict }) => (
+        <span key={stage} className={styles.stage}>
+          {verdict && <VerdictMark verdict={verdict} size={12} isWordHidden />} {stage}
+          {attempts > 1 && <span className={styles.attempts}> {attempts} attempts</span>}
+        </span>
+      ))}
+    </span>
+  );
+}
+
+export function UnitTable({ units }: { units: UnitItem[] }) {
+  return (
+    <DataTable
+      caption="Units, last tested first"
+      columns={columns}
+      rows={units}
+      rowKey={({ partNumber, serialNumber }) => `${partNumber} ${serialNumber}`}
+    />
+  );
+}
