@@ -15,6 +15,7 @@ import { LiveModule } from './live/live.module.js';
 import { LocalMailboxModule } from './local-mailbox/local-mailbox.module.js';
 import { MailModule } from './mail/mail.module.js';
 import { ProductsModule } from './products/products.module.js';
+import { ProofModule } from './proof/proof.module.js';
 import { ResultsModule } from './results/results.module.js';
 import { SiteSetupModule } from './site-setup/site-setup.module.js';
 import { SiteModule } from './site/site.module.js';
@@ -48,6 +49,7 @@ export class AppModule {
         ResultsModule,
         UnitsModule,
         TodayModule,
+        ProofModule,
         SiteModule,
         SiteSetupModule,
       ],

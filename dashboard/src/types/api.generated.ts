@@ -447,6 +447,23 @@ export interface paths {
         patch?: never;
         trace?: never;
     };
+    "/api/v1/proof": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        /** Published cases recomputed on the spot by this installation, beside their sources */
+        get: operations["Proof_prove"];
+        put?: never;
+        post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
     "/api/v1/site": {
         parameters: {
             query?: never;
@@ -503,13 +520,13 @@ export interface components {
             low: number | null;
             high: number | null;
             /** @enum {string} */
-            bound: "exact" | "atLeast" | "atMost";
+            bound: "atLeast" | "atMost" | "exact";
             limit: components["schemas"]["LimitInForceDto"] | null;
             /**
              * @description Null when nothing limits this measure.
              * @enum {string|null}
              */
-            outcome: "pass" | "fail" | "notProven" | null;
+            outcome: "fail" | "notProven" | "pass" | null;
             probabilityOfConformity: number | null;
             /** @description Why there is no value. */
             reason: string | null;
@@ -563,9 +580,9 @@ export interface components {
              * @example outputImpedance
              * @enum {string}
              */
-            measure: "stoppedOnFail" | "referenceCurrent" | "setpointError" | "outputImpedance" | "relativeSlope" | "loadRegulation" | "complianceVoltage" | "linearityError" | "settlingDrift" | "sweepHysteresis" | "impedanceCurrentProduct" | "effectiveEarlyVoltage";
+            measure: "complianceVoltage" | "effectiveEarlyVoltage" | "impedanceCurrentProduct" | "linearityError" | "loadRegulation" | "outputImpedance" | "referenceCurrent" | "relativeSlope" | "setpointError" | "settlingDrift" | "stoppedOnFail" | "sweepHysteresis";
             /** @enum {string} */
-            state: "open" | "acknowledged" | "closed";
+            state: "acknowledged" | "closed" | "open";
             /** @example 12 */
             breachId: number;
             /** @example Output impedance out of limits: FH-R500-W at final */
@@ -601,9 +618,9 @@ export interface components {
              * @example outputImpedance
              * @enum {string}
              */
-            measure: "stoppedOnFail" | "referenceCurrent" | "setpointError" | "outputImpedance" | "relativeSlope" | "loadRegulation" | "complianceVoltage" | "linearityError" | "settlingDrift" | "sweepHysteresis" | "impedanceCurrentProduct" | "effectiveEarlyVoltage";
+            measure: "complianceVoltage" | "effectiveEarlyVoltage" | "impedanceCurrentProduct" | "linearityError" | "loadRegulation" | "outputImpedance" | "referenceCurrent" | "relativeSlope" | "setpointError" | "settlingDrift" | "stoppedOnFail" | "sweepHysteresis";
             /** @enum {string} */
-            state: "open" | "acknowledged" | "closed";
+            state: "acknowledged" | "closed" | "open";
             /** @example 12 */
             breachId: number;
             /** @example Output impedance out of limits: FH-R500-W at final */
@@ -734,7 +751,7 @@ export interface components {
             password: string;
             displayName: string;
             /** @enum {string} */
-            role: "viewer" | "productionEngineer" | "qualityLead" | "integrator" | "administrator";
+            role: "administrator" | "integrator" | "productionEngineer" | "qualityLead" | "viewer";
         };
         HealthDto: {
             status: string;
@@ -773,7 +790,7 @@ export interface components {
             partNumber: string | null;
             serialNumber: string | null;
             /** @enum {string|null} */
-            verdict: "aborted" | "pass" | "fail" | "notProven" | "unjudged" | null;
+            verdict: "aborted" | "fail" | "notProven" | "pass" | "unjudged" | null;
             /** @description Why it was refused, place by place. */
             errors: components["schemas"]["ProblemErrorDto"][];
         };
@@ -792,13 +809,13 @@ export interface components {
             low: number | null;
             high: number | null;
             /** @enum {string} */
-            bound: "exact" | "atLeast" | "atMost";
+            bound: "atLeast" | "atMost" | "exact";
             limit: components["schemas"]["LimitInForceDto"] | null;
             /**
              * @description Null when nothing limits this measure.
              * @enum {string|null}
              */
-            outcome: "pass" | "fail" | "notProven" | null;
+            outcome: "fail" | "notProven" | "pass" | null;
             probabilityOfConformity: number | null;
             /** @description Why there is no value. */
             reason: string | null;
@@ -828,7 +845,7 @@ export interface components {
             id: string | null;
         };
         /** @enum {string} */
-        LiveTopic: "results" | "breaches" | "stations" | "intake" | "mailbox";
+        LiveTopic: "breaches" | "intake" | "mailbox" | "results" | "stations";
         MailboxItemDto: {
             /** @example 1796025342010-9f86d081884c */
             mailId: string;
@@ -858,7 +875,7 @@ export interface components {
         };
         MeasureLimitDto: {
             /** @enum {string} */
-            measure: "referenceCurrent" | "setpointError" | "outputImpedance" | "relativeSlope" | "loadRegulation" | "complianceVoltage" | "linearityError" | "settlingDrift" | "sweepHysteresis" | "impedanceCurrentProduct" | "effectiveEarlyVoltage";
+            measure: "complianceVoltage" | "effectiveEarlyVoltage" | "impedanceCurrentProduct" | "linearityError" | "loadRegulation" | "outputImpedance" | "referenceCurrent" | "relativeSlope" | "setpointError" | "settlingDrift" | "sweepHysteresis";
             lower: number | null;
             upper: number | null;
             /** @enum {string} */
@@ -867,7 +884,7 @@ export interface components {
         };
         OutboxMailDto: {
             /** @enum {string} */
-            state: "waiting" | "sent" | "failed";
+            state: "failed" | "sent" | "waiting";
             mailId: number;
             /** @example quality@fernhollow.example */
             to: string;
@@ -898,12 +915,12 @@ export interface components {
             /**
              * @description Only production counts in the yields.
              * @default production
-             * @enum {unknown}
+             * @enum {string}
              */
             runKind?: "production" | "golden" | "study" | "practice";
             /**
              * @description What the station says of the run; `aborted` wants an abortReason and counts as no attempt.
-             * @enum {unknown}
+             * @enum {string}
              */
             outcome: "completed" | "stoppedOnFail" | "aborted";
             abortReason?: components["schemas"]["PostedText"];
@@ -938,7 +955,7 @@ export interface components {
             warmUpSeconds?: number;
             supplyVolts?: components["schemas"]["PostedReading"];
             load?: {
-                /** @enum {unknown} */
+                /** @enum {string} */
                 kind: "resistor" | "electronicLoad" | "sourceMeter";
                 serialNumber?: components["schemas"]["PostedName"];
             };
@@ -970,17 +987,17 @@ export interface components {
                 outputAmps: components["schemas"]["PostedReading"];
                 loadOhms?: number;
                 elapsedMs?: number;
-                /** @enum {unknown} */
+                /** @enum {string} */
                 direction?: "up" | "down" | "repeat";
                 outputAmpsStdDev?: components["schemas"]["PostedPositive"];
                 ammeterRangeAmps?: components["schemas"]["PostedPositive"];
                 overload?: boolean;
             }[];
-            /** @enum {unknown} */
+            /** @enum {string} */
             stationVerdict?: "pass" | "fail";
             /**
              * @description Whose verdict moved the unit on.
-             * @enum {unknown}
+             * @enum {string}
              */
             routedOn?: "hub" | "station";
             notes?: string;
@@ -1035,9 +1052,9 @@ export interface components {
             /** @description τ as a fraction. */
             complianceTolerance: number;
             /** @enum {string} */
-            direction: "source" | "sink";
+            direction: "sink" | "source";
             /** @enum {string} */
-            circuitKind: "twoTransistorMirror" | "wilsonMirror" | "cascode" | "opAmpPassTransistor" | "other";
+            circuitKind: "cascode" | "opAmpPassTransistor" | "other" | "twoTransistorMirror" | "wilsonMirror";
             caution: string | null;
             stages: components["schemas"]["ProductStageDto"][];
         };
@@ -1051,6 +1068,48 @@ export interface components {
             testPlan: components["schemas"]["TestPlanDto"] | null;
             /** @description In force now. */
             limitSet: components["schemas"]["LimitSetDto"] | null;
+        };
+        ProofDto: {
+            /** @example 2026-11-30T12:00:00.000Z */
+            computedAt: string;
+            /** @example 0.1.0 */
+            version: string;
+            /** @description Rows that agree to the digits required. */
+            passed: number;
+            failed: number;
+            rows: components["schemas"]["ProofRowDto"][];
+        };
+        ProofRowDto: {
+            /** @example reg-nist-norris */
+            caseId: string;
+            /** @example StRD linear regression: Norris */
+            title: string;
+            /** @example NIST Statistical Reference Datasets (StRD), linear regression — Norris data set */
+            source: string;
+            /**
+             * @description `source read`: the printed figure was seen in some text; `from memory`: recalled, then recomputed; `derived`: no
+             *     printed figure is known, the value was computed independently.
+             * @example source read
+             * @enum {string}
+             */
+            status: "derived" | "from memory" | "source read";
+            /** @example estimate.B1 */
+            quantity: string;
+            /**
+             * @description The digits of the source, as text.
+             * @example 1.00211681802045
+             */
+            published: string;
+            /** @example 1.00211681802045 */
+            computed: string;
+            /**
+             * @description At most 15: double precision holds no more.
+             * @example 14
+             */
+            agreeingDigits: number;
+            /** @example 11 */
+            requiredDigits: number;
+            ok: boolean;
         };
         RefusedPostDto: {
             /**
@@ -1072,7 +1131,7 @@ export interface components {
             partNumber: string | null;
             serialNumber: string | null;
             /** @enum {string|null} */
-            verdict: "aborted" | "pass" | "fail" | "notProven" | "unjudged" | null;
+            verdict: "aborted" | "fail" | "notProven" | "pass" | "unjudged" | null;
             /** @description Why it was refused, place by place. */
             errors: components["schemas"]["ProblemErrorDto"][];
             title: string;
@@ -1087,14 +1146,14 @@ export interface components {
             resultId: string;
             receivedAt: string;
             /** @enum {string} */
-            verdict: "aborted" | "pass" | "fail" | "notProven" | "unjudged";
+            verdict: "aborted" | "fail" | "notProven" | "pass" | "unjudged";
             /** @description Number among the unit's counted results at this stage; null when it isn't counted. */
             attempt: number | null;
             /**
              * @description Where the unit shall go.
              * @enum {string}
              */
-            disposition: "next" | "retest" | "retestElsewhere" | "repair" | "hold" | "stop";
+            disposition: "hold" | "next" | "repair" | "retest" | "retestElsewhere" | "stop";
             nextStage: string | null;
             attemptsLeft: number | null;
             /** @description Null when there is no prior stage. */
@@ -1125,11 +1184,11 @@ export interface components {
             /** @description Null where attempts aren't counted. */
             attempt: number | null;
             /** @enum {string} */
-            verdict: "aborted" | "pass" | "fail" | "notProven" | "unjudged";
+            verdict: "aborted" | "fail" | "notProven" | "pass" | "unjudged";
             /** @enum {string} */
-            runKind: "production" | "golden" | "study" | "practice";
+            runKind: "golden" | "practice" | "production" | "study";
             /** @enum {string} */
-            outcome: "completed" | "stoppedOnFail" | "aborted";
+            outcome: "aborted" | "completed" | "stoppedOnFail";
             slope: components["schemas"]["SlopeMarkDto"];
             failedMeasures: string[];
             flags: string[];
@@ -1145,14 +1204,14 @@ export interface components {
             supplyVolts: number | null;
             abortReason: string | null;
             /** @enum {string|null} */
-            stationVerdict: "pass" | "fail" | null;
+            stationVerdict: "fail" | "pass" | null;
             /** @enum {string|null} */
             routedOn: "hub" | "station" | null;
             notes: string | null;
             testPlanVersion: number | null;
             limitSetVersion: number | null;
             /** @enum {string} */
-            disposition: "next" | "retest" | "retestElsewhere" | "repair" | "hold" | "stop";
+            disposition: "hold" | "next" | "repair" | "retest" | "retestElsewhere" | "stop";
             nextStage: string | null;
             attemptsLeft: number | null;
             measures: components["schemas"]["JudgedMeasureDto"][];
@@ -1174,30 +1233,26 @@ export interface components {
         };
         RightDto: {
             /**
-             * @description `station`: with an API key, and by the people of `roles`, if any.
+             * @description Who may use it; `roles` names the people. `station`: with an API key, besides people, if any.
              * @example roles
              * @enum {string}
              */
-            access: "public" | "station" | "anySignedIn" | "roles";
+            access: "anySignedIn" | "public" | "roles" | "station";
             /**
-             * @description The roles of people who may use it.
              * @example [
              *       "administrator"
              *     ]
              */
             roles: components["schemas"]["Role"][];
-            /** @example PATCH */
+            /** @example POST */
             method: string;
-            /** @example /api/v1/users/{userId} */
+            /** @example /api/v1/users */
             path: string;
-            /** @example Change an accounts name, role or password, disable or enable it */
+            /** @example Create an account */
             summary: string;
         };
-        /**
-         * @description The roles of people who may use it.
-         * @enum {string}
-         */
-        Role: "viewer" | "productionEngineer" | "qualityLead" | "integrator" | "administrator";
+        /** @enum {string} */
+        Role: "administrator" | "integrator" | "productionEngineer" | "qualityLead" | "viewer";
         RunItemDto: {
             /** @example 0193f3a2-6f0e-7c52-9a3e-5b1f4c0d2e11 */
             resultId: string;
@@ -1215,11 +1270,11 @@ export interface components {
             /** @description Null where attempts aren't counted. */
             attempt: number | null;
             /** @enum {string} */
-            verdict: "aborted" | "pass" | "fail" | "notProven" | "unjudged";
+            verdict: "aborted" | "fail" | "notProven" | "pass" | "unjudged";
             /** @enum {string} */
-            runKind: "production" | "golden" | "study" | "practice";
+            runKind: "golden" | "practice" | "production" | "study";
             /** @enum {string} */
-            outcome: "completed" | "stoppedOnFail" | "aborted";
+            outcome: "aborted" | "completed" | "stoppedOnFail";
             slope: components["schemas"]["SlopeMarkDto"];
             failedMeasures: string[];
             flags: string[];
@@ -1255,7 +1310,7 @@ export interface components {
             limitSiemens: number | null;
             impedanceOhms: number | null;
             /** @enum {string} */
-            impedanceBound: "exact" | "atLeast" | "atMost";
+            impedanceBound: "atLeast" | "atMost" | "exact";
             referenceAmps: number | null;
         };
         StationDto: {
@@ -1267,7 +1322,7 @@ export interface components {
              * @description `posting`: within the last ten minutes.
              * @enum {string}
              */
-            state: "posting" | "quiet" | "neverPosted";
+            state: "neverPosted" | "posting" | "quiet";
             lastPostAt: string | null;
             latest: components["schemas"]["RunItemDto"] | null;
             postsToday: number;
@@ -1292,7 +1347,7 @@ export interface components {
             limitLine: components["schemas"]["SweepLinePointDto"][];
             complianceVolts: number | null;
             /** @enum {string} */
-            complianceBound: "exact" | "atLeast" | "atMost";
+            complianceBound: "atLeast" | "atMost" | "exact";
             kneeFound: boolean;
             fit: components["schemas"]["SweepFitDto"] | null;
         };
@@ -1320,7 +1375,7 @@ export interface components {
             /** @description Deviation from the reference current. */
             deviationPpm: number | null;
             /** @enum {string|null} */
-            direction: "up" | "down" | "repeat" | null;
+            direction: "down" | "repeat" | "up" | null;
             /** @description The straight line was fitted through it. */
             inFit: boolean;
             overload: boolean;
@@ -1335,7 +1390,7 @@ export interface components {
         };
         TodayChangeDto: {
             /** @enum {string} */
-            kind: "notProven" | "silent" | "firstPass";
+            kind: "firstPass" | "notProven" | "silent";
             text: string;
             partNumber: string | null;
             stage: string | null;
@@ -1405,7 +1460,7 @@ export interface components {
              * @description Of the latest attempt; null when there is none.
              * @enum {string|null}
              */
-            verdict: "aborted" | "pass" | "fail" | "notProven" | "unjudged" | null;
+            verdict: "aborted" | "fail" | "notProven" | "pass" | "unjudged" | null;
             /** @description All results, the oldest first, golden and practice ones included. */
             results: components["schemas"]["RunItemDto"][];
         };
@@ -1417,7 +1472,7 @@ export interface components {
              * @description Of the latest attempt; null when there is none.
              * @enum {string|null}
              */
-            verdict: "aborted" | "pass" | "fail" | "notProven" | "unjudged" | null;
+            verdict: "aborted" | "fail" | "notProven" | "pass" | "unjudged" | null;
         };
         UpdateUserDto: {
             /** @example productionEngineer */
@@ -2537,7 +2592,7 @@ export interface operations {
                 /** @description Items per page. */
                 limit?: number;
                 /** @description Left out: all. */
-                state?: "open" | "acknowledged" | "closed" | "all";
+                state?: "acknowledged" | "all" | "closed" | "open";
             };
             header?: never;
             path?: never;
@@ -2840,7 +2895,7 @@ export interface operations {
                 cursor?: string;
                 /** @description Items per page. */
                 limit?: number;
-                kind?: "all" | "accepted" | "refused";
+                kind?: "accepted" | "all" | "refused";
                 station?: string;
             };
             header?: never;
@@ -2964,8 +3019,8 @@ export interface operations {
                 stage?: string;
                 station?: string;
                 lot?: string;
-                verdict?: "pass" | "fail" | "notProven" | "unjudged" | "aborted";
-                runKind?: "production" | "golden" | "study" | "practice";
+                verdict?: "aborted" | "fail" | "notProven" | "pass" | "unjudged";
+                runKind?: "golden" | "practice" | "production" | "study";
             };
             header?: never;
             path?: never;
@@ -3273,7 +3328,7 @@ export interface operations {
                 /** @description Of the unit's latest result. */
                 station?: string;
                 /** @description Of the unit's latest result. */
-                verdict?: "pass" | "fail" | "notProven" | "unjudged" | "aborted";
+                verdict?: "aborted" | "fail" | "notProven" | "pass" | "unjudged";
             };
             header?: never;
             path?: never;
@@ -3400,6 +3455,52 @@ export interface operations {
                 };
                 content: {
                     "application/json": components["schemas"]["TodayDto"];
+                };
+            };
+            /** @description Not signed in, or no known API key */
+            401: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+            /** @description Not allowed */
+            403: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+            /** @description Too many requests; wait as `Retry-After` says */
+            429: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
+    };
+    Proof_prove: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["ProofDto"];
                 };
             };
             /** @description Not signed in, or no known API key */
