@@ -5,25 +5,32 @@ import type { INestApplicationContext } from '@nestjs/common';
 import type { StationKeys } from './database/station-keys.js';
 import type { HistoryPost } from './history/build-history.js';
 
+export interface HistorySteps {
+  before(at: Date): void;
+  after(at: Date, loaded: number): Promise<void>;
+}
+
 /** Posts that are under way together: the writer commits them as one group. */
-const TOGETHER = 100;
+const TOGETHER = 50;
 
 /**
  * Hands a history to the same intake that takes the stations' posts, in the order of arrival. Rejects at the
  * first post that is not taken.
  *
- * @param onProgress called with the number of results loaded so far
+ * @param steps called before and after each group with the time that its last post was received
  */
 export async function loadHistory(
   app: INestApplicationContext,
   keys: StationKeys,
   history: readonly HistoryPost[],
-  onProgress: (loaded: number) => void,
+  steps: HistorySteps,
 ): Promise<void> {
   const results = app.get(ResultsService, { strict: false });
   const principals = stationPrincipals(app, keys);
   for (let first = 0; first < history.length; first += TOGETHER) {
     const group = history.slice(first, first + TOGETHER);
+    const at = group.at(-1)?.receivedAt ?? new Date(0);
+    steps.before(at);
     await Promise.all(
       group.map(({ station, receivedAt, post }) =>
         results.record(Buffer.from(JSON.stringify(post)), principals(station), {
@@ -32,7 +39,7 @@ export async function loadHistory(
         }),
       ),
     );
-    onProgress(first + group.length);
+    await steps.after(at, first + group.length);
   }
 }
 

@@ -5,10 +5,10 @@ import { runStatement } from '@ampkeep/ingest-api/dist/database/sql.js';
 import { Writer } from '@ampkeep/ingest-api/dist/database/writer.js';
 import { ResultsService } from '@ampkeep/ingest-api/dist/results/results.service.js';
 import { SiteSetupService } from '@ampkeep/ingest-api/dist/site-setup/site-setup.service.js';
-import { demoAccounts } from '@ampkeep/ingest-api/dist/site/demo-accounts.js';
 import type { INestApplicationContext } from '@nestjs/common';
 import { createDemoAccounts } from './database/create-demo-accounts.js';
 import { SEEDED_AT } from './database/demo-database.js';
+import { acknowledgeOne, closeQuietBreaches, findQualityLead } from './database/handle-breaches.js';
 import { stationKeys, type StationKeys } from './database/station-keys.js';
 import { buildHistory, demoHistory, type HistoryPost } from './history/build-history.js';
 import { judgePost } from './history/judge-post.js';
@@ -43,16 +43,24 @@ export async function seedDatabase({
     await app.init();
     report('Accounts, products, test plans, limits and stations');
     await createDemoAccounts(app, setUpAt);
-    const qualityLead = demoAccounts.find(({ role }) => role === 'qualityLead')?.email ?? 'system';
-    await app.get(SiteSetupService, { strict: false }).apply(describeSite(now, setUpAt), qualityLead);
+    const qualityLead = await findQualityLead();
+    await app.get(SiteSetupService, { strict: false }).apply(describeSite(now, setUpAt), qualityLead.email);
     const keys = await stationKeys(app, env.dataDir);
 
     report(`A history of ${days} days`);
-    time = now.getTime();
     const history = buildHistory({ ...demoHistory, days, now }, judgePost);
-    await loadHistory(app, keys, history, (loaded) => {
-      if (loaded % 300 === 0 || loaded === history.length) report(`  ${loaded} of ${history.length} results`);
+    await loadHistory(app, keys, history, {
+      before: (at) => {
+        time = at.getTime();
+      },
+      after: async (at, loaded) => {
+        await closeQuietBreaches(app, at, qualityLead);
+        if (loaded % 300 === 0 || loaded === history.length)
+          report(`  ${loaded} of ${history.length} results`);
+      },
     });
+    time = now.getTime();
+    await acknowledgeOne(app, qualityLead);
     for (const refused of refusedPosts(exampleOf(history))) {
       time = now.getTime() - refused.hoursAgo * HOUR_MS;
       await refuse(app, keys, refused.station, refused.body);
