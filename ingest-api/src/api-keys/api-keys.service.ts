@@ -4,7 +4,7 @@ import { AuditService } from '../audit/audit.service.js';
 import type { StationPrincipal } from '../auth/principals.js';
 import { ForbiddenError, InvalidError, KeyRequiredError, NotFoundError } from '../common/errors.js';
 import { CLOCK, type Clock } from '../config/config.module.js';
-import { runStatement } from '../database/sql.js';
+import { listTable, runStatement } from '../database/sql.js';
 import { Writer } from '../database/writer.js';
 import { StationRegister } from '../stations/station-register.service.js';
 import type { CreateApiKeyDto } from './dto/create-api-key.dto.js';
@@ -149,7 +149,7 @@ export class ApiKeysService implements OnModuleInit, OnApplicationShutdown {
         runStatement(
           transaction,
           `UPDATE api_keys SET last_used_at = u.at
-           FROM (SELECT value ->> 0 AS id, value ->> 1 AS at FROM json_each(?)) AS u WHERE api_key_id = u.id`,
+           FROM ${listTable('?', ['id', 'at'])} AS u WHERE api_key_id = u.id`,
           JSON.stringify(uses),
         ),
       )

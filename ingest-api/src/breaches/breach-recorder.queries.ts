@@ -1,5 +1,5 @@
 import type { Transaction } from 'sequelize';
-import { runStatement, selectRows } from '../database/sql.js';
+import { inList, recordTable, runStatement, selectRows } from '../database/sql.js';
 import type { BreachMeasure, BreachState } from './models/breach.model.js';
 
 export interface UnclosedBreach {
@@ -33,7 +33,7 @@ export async function findUnclosed(
   causeKeys: readonly string[],
 ): Promise<Map<string, UnclosedBreach>> {
   const sql = `SELECT ${returned} FROM breaches
-    WHERE state <> 'closed' AND cause_key IN (SELECT value FROM json_each(?))`;
+    WHERE state <> 'closed' AND cause_key ${inList('?')}`;
   return byCauseKey(await selectRows<UnclosedBreach>(transaction, sql, JSON.stringify(causeKeys)));
 }
 
@@ -43,9 +43,8 @@ export async function openBreaches(
 ): Promise<Map<string, UnclosedBreach>> {
   if (breaches.length === 0) return new Map();
   const sql = `INSERT INTO breaches (cause_key, stage_id, measure, state, opened_at, last_event_at, event_count)
-    SELECT value ->> 'causeKey', value ->> 'stageId', value ->> 'measure', 'open',
-      value ->> 'openedAt', value ->> 'openedAt', 0
-    FROM json_each(?) WHERE true
+    SELECT causeKey, stageId, measure, 'open', openedAt, openedAt, 0
+    FROM ${recordTable('?', ['causeKey', 'stageId', 'measure', 'openedAt'])} WHERE true
     RETURNING ${returned}`;
   return byCauseKey(await selectRows<UnclosedBreach>(transaction, sql, JSON.stringify(breaches)));
 }
@@ -56,7 +55,7 @@ export async function addEvents(transaction: Transaction, events: readonly NewBr
   await runStatement(
     transaction,
     `INSERT INTO breach_events (breach_id, result_id, at, text)
-      SELECT value ->> 'breachId', value ->> 'resultId', value ->> 'at', value ->> 'text' FROM json_each(?)`,
+      SELECT breachId, resultId, at, text FROM ${recordTable('?', ['breachId', 'resultId', 'at', 'text'])}`,
     rows,
   );
   await runStatement(
@@ -66,9 +65,8 @@ export async function addEvents(transaction: Transaction, events: readonly NewBr
         last_event_at = max(last_event_at, added.last_at),
         latest_result_id = added.latest_result_id
       FROM (
-        SELECT value ->> 'breachId' AS breach_id, count(*) AS events, max(value ->> 'at') AS last_at,
-          max(value ->> 'resultId') AS latest_result_id
-        FROM json_each(?) GROUP BY 1
+        SELECT breachId AS breach_id, count(*) AS events, max(at) AS last_at, max(resultId) AS latest_result_id
+        FROM ${recordTable('?', ['breachId', 'resultId', 'at'])} GROUP BY 1
       ) AS added
       WHERE breaches.breach_id = added.breach_id`,
     rows,
@@ -83,7 +81,7 @@ export async function markMailed(
   if (breachIds.size === 0) return;
   await runStatement(
     transaction,
-    'UPDATE breaches SET mailed_at = ? WHERE breach_id IN (SELECT value FROM json_each(?))',
+    `UPDATE breaches SET mailed_at = ? WHERE breach_id ${inList('?')}`,
     at,
     JSON.stringify([...breachIds]),
   );

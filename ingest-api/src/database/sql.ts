@@ -28,3 +28,25 @@ export function runStatement(
     });
   });
 }
+
+/*
+ * What only SQLite knows, as fragments for the statements of `*.queries.ts` and `*-statements.ts`: a whole
+ * list travels as one JSON parameter.
+ */
+
+/** `IN` over a JSON array: `WHERE unit_id ${inList('?')}`. */
+export const inList = (parameter: string): string => `IN (SELECT value FROM json_each(${parameter}))`;
+
+/** A JSON array of arrays as a table with these columns: `FROM ${listTable('?', ['id', 'at'])} AS u`. */
+export const listTable = (parameter: string, columns: readonly string[]): string =>
+  `(SELECT ${columns.map((column, index) => `value ->> ${index} AS ${column}`).join(', ')} FROM json_each(${parameter}))`;
+
+/** A JSON array of objects as a table; each column takes the property of its name. */
+export const recordTable = (parameter: string, columns: readonly string[]): string =>
+  `(SELECT ${columns.map((column) => `value ->> '${column}' AS ${column}`).join(', ')} FROM json_each(${parameter}))`;
+
+/** A BLOB from its hexadecimal text, since JSON carries no bytes. */
+export const blobOfHex = (expression: string): string => `unhex(${expression})`;
+
+/** Random hexadecimal text of `bytes` bytes. */
+export const randomHex = (bytes: number): string => `lower(hex(randomblob(${bytes})))`;

@@ -1,5 +1,5 @@
 import { Op, type Transaction } from 'sequelize';
-import { runStatement, selectRows } from '../database/sql.js';
+import { randomHex, recordTable, runStatement, selectRows } from '../database/sql.js';
 import { OutboxMail } from './models/outbox-mail.model.js';
 
 /** Asks for one mail per active quality lead. */
@@ -25,9 +25,9 @@ export async function enqueueBreachMails(
   host: string,
 ): Promise<Set<number>> {
   const sql = `INSERT INTO outbox (message_id, breach_id, recipient, subject, state, created_at, next_try_at)
-    SELECT '<breach-' || (value ->> 'breachId') || '-' || lower(hex(randomblob(12))) || '@' || ? || '>',
-      value ->> 'breachId', users.email, value ->> 'subject', 'waiting', value ->> 'createdAt', value ->> 'createdAt'
-    FROM json_each(?) CROSS JOIN users
+    SELECT '<breach-' || wanted.breachId || '-' || ${randomHex(12)} || '@' || ? || '>',
+      wanted.breachId, users.email, wanted.subject, 'waiting', wanted.createdAt, wanted.createdAt
+    FROM ${recordTable('?', ['breachId', 'subject', 'createdAt'])} AS wanted CROSS JOIN users
     WHERE users.role = 'qualityLead' AND users.active = 1
     RETURNING breach_id AS breachId`;
   const rows = await selectRows<{ breachId: number }>(transaction, sql, host, JSON.stringify(orders));

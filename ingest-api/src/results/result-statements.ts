@@ -1,5 +1,5 @@
 import type { Transaction } from 'sequelize';
-import { runStatement, selectRows } from '../database/sql.js';
+import { blobOfHex, inList, listTable, runStatement, selectRows } from '../database/sql.js';
 import type { AttemptOrder } from './attempts.js';
 import type { PreparedResult } from './prepared-result.js';
 import type { ResultAnswer } from './result.types.js';
@@ -21,7 +21,7 @@ export function findExisting(transaction: Transaction, uuids: readonly string[])
     transaction,
     `SELECT r.result_uuid AS resultUuid, r.station_id AS stationId, b.canonical_sha256 AS canonicalSha256, r.answer
      FROM results r JOIN result_bodies b USING (result_id)
-     WHERE r.result_uuid IN (SELECT value FROM json_each(?))`,
+     WHERE r.result_uuid ${inList('?')}`,
     JSON.stringify(uuids),
   );
 }
@@ -33,6 +33,8 @@ export interface UnitPlace {
   latestResultId: number | null;
 }
 
+const wantedTable = listTable('?', ['product_id', 'serial_number', 'lot']);
+
 /** Adds lots and units not seen before and gives the units' ids. */
 export async function placeUnits(
   transaction: Transaction,
@@ -42,20 +44,20 @@ export async function placeUnits(
   await runStatement(
     transaction,
     `INSERT INTO lots (product_id, name)
-     SELECT DISTINCT value ->> 0, value ->> 2 FROM json_each(?) WHERE value ->> 2 IS NOT NULL
+     SELECT DISTINCT product_id, lot FROM ${wantedTable} WHERE lot IS NOT NULL
      ON CONFLICT DO NOTHING`,
     wanted,
   );
   await runStatement(
     transaction,
     `INSERT INTO units (product_id, serial_number)
-     SELECT DISTINCT value ->> 0, value ->> 1 FROM json_each(?) WHERE true ON CONFLICT DO NOTHING`,
+     SELECT DISTINCT product_id, serial_number FROM ${wantedTable} WHERE true ON CONFLICT DO NOTHING`,
     wanted,
   );
   return selectRows(
     transaction,
     `SELECT u.product_id AS productId, u.serial_number AS serialNumber, u.unit_id AS unitId, u.latest_result_id AS latestResultId
-     FROM (SELECT DISTINCT value ->> 0 AS product_id, value ->> 1 AS serial_number FROM json_each(?)) w
+     FROM (SELECT DISTINCT product_id, serial_number FROM ${wantedTable}) w
      JOIN units u USING (product_id, serial_number)`,
     wanted,
   );
@@ -75,7 +77,7 @@ export function findLots(transaction: Transaction, results: readonly PreparedRes
   return selectRows(
     transaction,
     `SELECT DISTINCT l.product_id AS productId, l.name, l.lot_id AS lotId, l.state
-     FROM json_each(?) w JOIN lots l ON l.product_id = w.value ->> 0 AND l.name = w.value ->> 1`,
+     FROM ${listTable('?', ['product_id', 'name'])} w JOIN lots l USING (product_id, name)`,
     JSON.stringify(wanted),
   );
 }
@@ -93,7 +95,7 @@ export function findCounted(transaction: Transaction, unitIds: readonly number[]
     transaction,
     `SELECT unit_id AS unitId, stage_id AS stageId, result_uuid AS resultUuid, started_at AS startedAt,
             finished_at AS finishedAt, verdict, attempt
-     FROM results WHERE counted = 1 AND unit_id IN (SELECT value FROM json_each(?))`,
+     FROM results WHERE counted = 1 AND unit_id ${inList('?')}`,
     JSON.stringify(unitIds),
   );
 }
@@ -148,7 +150,10 @@ const resultColumns: readonly [column: string, value: (placed: PlacedResult) => 
 ];
 
 const insertResultsSql = `INSERT INTO results (${resultColumns.map(([column]) => column).join(', ')})
-  SELECT ${resultColumns.map((_, index) => `value ->> ${index}`).join(', ')} FROM json_each(?)`;
+  SELECT * FROM ${listTable(
+    '?',
+    resultColumns.map(([column]) => column),
+  )}`;
 
 export async function insertResults(
   transaction: Transaction,
@@ -162,7 +167,7 @@ export async function insertResults(
   await runStatement(
     transaction,
     `INSERT INTO result_bodies (result_id, canonical_sha256, body)
-     SELECT value ->> 0, value ->> 1, unhex(value ->> 2) FROM json_each(?)`,
+     SELECT result_id, canonical_sha256, ${blobOfHex('hex')} FROM ${listTable('?', ['result_id', 'canonical_sha256', 'hex'])}`,
     JSON.stringify(
       placed.map(({ resultId, result }) => [resultId, result.canonicalSha256, result.body.toString('hex')]),
     ),
@@ -178,7 +183,7 @@ export async function renumberAttempts(
   await runStatement(
     transaction,
     `UPDATE results SET attempt = n.attempt
-     FROM (SELECT value ->> 0 AS uuid, value ->> 1 AS attempt FROM json_each(?)) AS n WHERE result_uuid = n.uuid`,
+     FROM ${listTable('?', ['uuid', 'attempt'])} AS n WHERE result_uuid = n.uuid`,
     JSON.stringify(numbers),
   );
 }
@@ -190,7 +195,7 @@ export async function updateUnits(transaction: Transaction, unitIds: readonly nu
     `UPDATE units SET (latest_result_id, lot_id) =
        (SELECT r.result_id, coalesce(r.lot_id, units.lot_id) FROM results r
         WHERE r.unit_id = units.unit_id ORDER BY r.started_at DESC, r.result_id DESC LIMIT 1)
-     WHERE unit_id IN (SELECT value FROM json_each(?))`,
+     WHERE unit_id ${inList('?')}`,
     JSON.stringify(unitIds),
   );
 }

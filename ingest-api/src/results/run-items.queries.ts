@@ -1,6 +1,7 @@
 import { QueryTypes } from 'sequelize';
 import type { Sequelize } from 'sequelize-typescript';
 import type { Bound, Outcome, Verdict } from '../analysis/analysis.types.js';
+import { inList } from '../database/sql.js';
 import type { RunKind } from './result.types.js';
 
 export interface RunItemRow {
@@ -50,10 +51,7 @@ type Condition = [sql: string, value: unknown];
 
 function conditionsOf(filter: RunItemFilter): Condition[] {
   const all: Condition[] = [
-    [
-      'r.result_id IN (SELECT value FROM json_each($v))',
-      filter.resultIds && JSON.stringify(filter.resultIds),
-    ],
+    [`r.result_id ${inList('$v')}`, filter.resultIds && JSON.stringify(filter.resultIds)],
     ['r.result_uuid = $v', filter.resultUuid?.toLowerCase()],
     ['r.unit_id = $v', filter.unitId],
     ['p.part_number = $v', filter.partNumber],

@@ -1,5 +1,6 @@
 import { QueryTypes } from 'sequelize';
 import type { Sequelize } from 'sequelize-typescript';
+import { inList } from '../database/sql.js';
 import type { Verdict } from '../analysis/analysis.types.js';
 
 export interface UnitFilter {
@@ -60,8 +61,9 @@ export interface UnitStageRow {
 /** Attempts and latest verdict of each unit at each stage, counted results only. */
 export function findUnitStages(sequelize: Sequelize, unitIds: readonly number[]): Promise<UnitStageRow[]> {
   return sequelize.query<UnitStageRow>(
-    `SELECT unit_id AS unitId, stage_id AS stageId, max(attempt) AS attempts, verdict
-     FROM results WHERE counted = 1 AND unit_id IN (SELECT value FROM json_each($1)) GROUP BY unit_id, stage_id`,
+    `SELECT unit_id AS unitId, stage_id AS stageId, attempt AS attempts, verdict
+     FROM results r WHERE counted = 1 AND unit_id ${inList('$1')} AND attempt =
+       (SELECT max(l.attempt) FROM results l WHERE l.unit_id = r.unit_id AND l.stage_id = r.stage_id AND l.counted = 1)`,
     { bind: [JSON.stringify(unitIds)], type: QueryTypes.SELECT },
   );
 }
