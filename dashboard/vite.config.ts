@@ -33,6 +33,7 @@ export default defineConfig({
     environment: 'jsdom',
     setupFiles: ['src/testing/setup.ts'],
     css: false,
+    testTimeout: 30_000,
     env: { TZ: 'UTC' },
     include: ['src/**/*.test.{ts,tsx}'],
   },

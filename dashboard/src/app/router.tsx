@@ -4,16 +4,21 @@ import { RouteError } from '@/components/errors/route-error';
 import { connectRoutes } from './connect-routes';
 import { SignedInRoute } from './routes/signed-in';
 
+/** Nothing until the first page's chunk is there: it comes within a blink, and a flash of words would only distract. */
+const beforeFirstPage = { HydrateFallback: () => null };
+
 /** Every page is fetched when it is first opened. */
 export const routes: RouteObject[] = [
   {
     path: '/sign-in',
     lazy: async () => ({ Component: (await import('./routes/sign-in')).SignInRoute }),
     ErrorBoundary: RouteError,
+    ...beforeFirstPage,
   },
   {
     path: '/',
     Component: SignedInRoute,
+    ...beforeFirstPage,
     ErrorBoundary: RouteError,
     children: [
       {

@@ -1,7 +1,10 @@
 import '@testing-library/jest-dom/vitest';
-import { cleanup } from '@testing-library/react';
+import { cleanup, configure } from '@testing-library/react';
 import { afterEach, beforeEach, vi } from 'vitest';
 import { FakeEventSource } from './fake-event-source';
+
+// A page's first test also waits until its chunk is compiled.
+configure({ asyncUtilTimeout: 10_000 });
 
 class NoObserver {
   observe() {}

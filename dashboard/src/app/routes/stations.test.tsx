@@ -75,7 +75,7 @@ describe('the Stations page', () => {
     ]);
     await user.click(await screen.findByRole('button', { name: 'Add a station' }));
     await user.type(await screen.findByLabelText('Name'), 'south-3');
-    await user.type(screen.getByLabelText('Line'), 'south');
+    await user.type(screen.getByRole('textbox', { name: 'Line' }), 'south');
     await user.click(screen.getByRole('button', { name: 'Add station' }));
     expect(await screen.findByRole('heading', { level: 1, name: 'south-3' })).toBeVisible();
     expect(router.state.location.pathname).toBe('/stations/south-3');
@@ -93,7 +93,7 @@ describe('the Stations page', () => {
     await user.click(await screen.findByRole('button', { name: 'Add a station' }));
     const name = await screen.findByLabelText('Name');
     await user.type(name, 'South 3');
-    await user.type(screen.getByLabelText('Line'), 'south');
+    await user.type(screen.getByRole('textbox', { name: 'Line' }), 'south');
     await user.click(screen.getByRole('button', { name: 'Add station' }));
     expect(await screen.findByText('Small letters, digits and hyphens only.')).toBeVisible();
     expect(name).toHaveAttribute('aria-invalid', 'true');
