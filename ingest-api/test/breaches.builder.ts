@@ -71,7 +71,9 @@ export async function clearBreaches({ app, clock }: TestApp): Promise<void> {
   await app.get(Outbox).deliverDue();
   clock.now = startOfTest;
   await app.get(Writer).run(async (transaction) => {
-    for (const model of [OutboxMail, BreachEvent, Breach]) await model.destroy({ where: {}, transaction });
+    await OutboxMail.destroy({ where: {}, transaction });
+    await BreachEvent.destroy({ where: {}, transaction });
+    await Breach.destroy({ where: {}, transaction });
     await User.destroy({ where: { email: { [Op.notIn]: roles.map(emailOf) } }, transaction });
   });
 }
