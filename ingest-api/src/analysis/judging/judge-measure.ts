@@ -40,9 +40,31 @@ export function judgeMeasure(
   product: ProductSpec,
 ): MeasureJudgement {
   if (limit === null || (limit.lower === null && limit.upper === null)) {
-    return { ...measure, limit, outcome: null, probabilityOfConformity: null };
+    return withDecision(measure, limit, {
+      outcome: null,
+      probabilityOfConformity: null,
+      reason: measure.reason,
+    });
   }
-  return { ...measure, limit, ...decide(measure, limit, analysis, product) };
+  return withDecision(measure, limit, decide(measure, limit, analysis, product));
+}
+
+/** Written out, because spreading eleven measures into new objects would take longer than the whole fit. */
+function withDecision(measure: Measure, limit: Limit | null, decision: Decision): MeasureJudgement {
+  return {
+    name: measure.name,
+    unit: measure.unit,
+    value: measure.value,
+    estimate: measure.estimate,
+    expandedUncertainty: measure.expandedUncertainty,
+    low: measure.low,
+    high: measure.high,
+    bound: measure.bound,
+    reason: decision.reason,
+    limit,
+    outcome: decision.outcome,
+    probabilityOfConformity: decision.probabilityOfConformity,
+  };
 }
 
 function decide(measure: Measure, limit: Limit, analysis: SweepAnalysis, product: ProductSpec): Decision {
