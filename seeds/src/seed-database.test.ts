@@ -27,7 +27,7 @@ beforeAll(async () => {
     AMPKEEP_LOG_LEVEL: 'silent',
   });
   await seedDatabase({ env, now, days, report: (line) => lines.push(line) });
-}, 60_000);
+}, 120_000);
 
 afterAll(() => rm(dataDir, { recursive: true }));
 
