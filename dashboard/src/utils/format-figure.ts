@@ -72,6 +72,13 @@ export function percentText(share: number, decimals = 1): string {
   return `${Number(shown) === 100 ? '100' : shown}${NARROW_SPACE}%`;
 }
 
+/** A probability in per cent; what is practically certain either way is said as a bound. */
+export function probabilityText(probability: number): string {
+  if (probability > 0.999) return `> 99.9${NARROW_SPACE}%`;
+  if (probability < 0.001) return `< 0.1${NARROW_SPACE}%`;
+  return percentText(probability);
+}
+
 function prefixExponent(magnitude: number): number {
   if (magnitude === 0 || !Number.isFinite(magnitude)) return 0;
   const exponent = Math.floor(Math.log10(Number(magnitude.toPrecision(PLAIN_DIGITS))) / 3) * 3;

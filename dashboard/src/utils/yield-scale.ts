@@ -6,19 +6,30 @@ export interface YieldScale {
   ticks: number[];
 }
 
-const STARTS = [0.99, 0.98, 0.95, 0.9, 0.8, 0.6, 0.5, 0];
+/** Where the scale may start, and into how many parts it is then divided. */
+const STARTS: [start: number, parts: number][] = [
+  [0.99, 5],
+  [0.98, 4],
+  [0.95, 5],
+  [0.9, 5],
+  [0.8, 4],
+  [0.7, 3],
+  [0.6, 4],
+  [0.5, 5],
+  [0.4, 6],
+  [0.3, 7],
+  [0.2, 8],
+];
+const WHOLE: [start: number, parts: number] = [0, 5];
 
 /** One scale for all yields that are shown together: it ends at 100 % and starts at a round figure below the lowest. */
 export function yieldScale(yields: Yield[], targets: (number | null)[]): YieldScale {
   const lowest = Math.min(1, ...yields.map(({ low }) => low ?? 1), ...targets.map((target) => target ?? 1));
-  const from = STARTS.find((start) => start < lowest) ?? 0;
-  const span = 1 - from;
-  const step = span > 0.5 ? 0.2 : span > 0.2 ? 0.1 : span / 5 > 0.015 ? 0.02 : span / 5;
-  const count = Math.round(span / step);
+  const [from, parts] = STARTS.find(([start]) => start < lowest) ?? WHOLE;
   return {
     from,
     to: 1,
-    ticks: Array.from({ length: count + 1 }, (_, index) => from + (span * index) / count),
+    ticks: Array.from({ length: parts + 1 }, (_, index) => from + ((1 - from) * index) / parts),
   };
 }
 

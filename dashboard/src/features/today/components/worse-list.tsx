@@ -12,6 +12,8 @@ function unitsBehind({ kind, partNumber, stage, station }: TodayChange): string 
   return paths.units(query);
 }
 
+const sentence = (text: string) => (/[.!?]$/.test(text) ? text : `${text}.`);
+
 /** What is getting worse, a sentence each, with the way to the units behind it. */
 export function WorseList({ changes }: { changes: TodayChange[] }) {
   if (changes.length === 0) return <p className={styles.none}>Nothing is getting worse.</p>;
@@ -22,7 +24,12 @@ export function WorseList({ changes }: { changes: TodayChange[] }) {
           key={`${change.kind} ${change.partNumber} ${change.stage} ${change.station}`}
           className={styles.change}
         >
-          {change.text} <Link to={unitsBehind(change)}>See the units</Link>
+          {change.partNumber !== null && (
+            <strong className={styles.where}>
+              {change.partNumber} {change.stage}:{' '}
+            </strong>
+          )}
+          {sentence(change.text)} <Link to={unitsBehind(change)}>See the units</Link>
         </li>
       ))}
     </ul>

@@ -32,8 +32,13 @@ function attemptsText({ results, maxAttempts }: UnitStage): string {
   return `${counted} of at most ${maxAttempts} attempts`;
 }
 
+function attemptName({ attempt, outcome, runKind }: RunItem): string {
+  if (attempt !== null) return `Attempt ${attempt}`;
+  return outcome === 'aborted' ? 'Aborted, not counted' : `Run of kind ${runKind}, not counted`;
+}
+
 function Attempt({ run, isShown }: { run: RunItem; isShown: boolean }) {
-  const name = run.attempt === null ? `${run.runKind}, not counted` : `Attempt ${run.attempt}`;
+  const name = attemptName(run);
   return (
     <li className={styles.attempt} aria-current={isShown ? 'true' : undefined}>
       <SlopeMark slope={run.slope} size={48} />

@@ -2,7 +2,7 @@ import { DataTable, type DataColumn } from '@/components/ui/data-table';
 import { Figure } from '@/components/ui/figure';
 import { VerdictMark } from '@/components/ui/verdict-mark';
 import type { JudgedMeasure, LimitInForce } from '@/types/api';
-import { figureText, percentText } from '@/utils/format-figure';
+import { figureText, probabilityText } from '@/utils/format-figure';
 import styles from './measure-table.module.css';
 
 const columns: DataColumn<JudgedMeasure>[] = [
@@ -36,7 +36,7 @@ const columns: DataColumn<JudgedMeasure>[] = [
     align: 'end',
     isTight: true,
     cell: ({ probabilityOfConformity: probability }) =>
-      probability === null ? null : <span className="figures">{percentText(probability)}</span>,
+      probability === null ? null : <span className="figures">{probabilityText(probability)}</span>,
   },
   {
     key: 'words',

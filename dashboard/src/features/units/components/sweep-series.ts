@@ -63,6 +63,7 @@ export function limitSeries(sweep: Sweep, palette: ChartPalette): ChartSeries[] 
       symbol: 'none',
       silent: true,
       lineStyle: { color: palette.fail, width: LIMIT_WIDTH, type: [10, 4] },
+      labelLayout: { moveOverlap: 'shiftY' },
       endLabel: { show: true, formatter: 'limit', color: palette.fail, fontSize: 12 },
       data: sweep.limitLine.map(({ loadVolts, deviationPpm }) => [loadVolts, deviationPpm]),
     },
@@ -112,6 +113,7 @@ export function earlierSeries(
       type: EARLIER_DASHES[index % EARLIER_DASHES.length] ?? 'dashed',
     },
     itemStyle: { color: palette.faded },
+    labelLayout: { moveOverlap: 'shiftY' },
     endLabel: { show: true, formatter: name, color: palette.faded, fontSize: 12 },
     data: byVolts(sweep.points).map((point) => ({
       value: [point.loadVolts, point.deviationPpm ?? 0],

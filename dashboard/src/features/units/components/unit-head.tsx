@@ -2,6 +2,7 @@ import { Link } from 'react-router-dom';
 import { Button } from '@/components/ui/button';
 import { PageHeader } from '@/components/ui/page-header';
 import { SlopeMark } from '@/components/ui/slope-mark';
+import { TimeText } from '@/components/ui/time-text';
 import { VerdictMark } from '@/components/ui/verdict-mark';
 import { paths } from '@/config/paths';
 import type { RunItem, Unit } from '@/types/api';
@@ -22,7 +23,7 @@ export function UnitHead({ unit, shown }: { unit: Unit; shown: RunItem }) {
                 <VerdictMark verdict={shown.verdict} size={24} />
               </span>
             }
-            lead={<UnitLead unit={unit} />}
+            lead={<UnitLead unit={unit} shown={shown} />}
             actions={<Button onClick={() => window.print()}>Print the record</Button>}
           />
         </div>
@@ -36,7 +37,7 @@ export function UnitHead({ unit, shown }: { unit: Unit; shown: RunItem }) {
   );
 }
 
-function UnitLead({ unit: { partNumber, description, lot } }: { unit: Unit }) {
+function UnitLead({ unit: { partNumber, description, lot }, shown }: { unit: Unit; shown: RunItem }) {
   return (
     <>
       <span className="figures">{partNumber}</span> {description}
@@ -48,6 +49,9 @@ function UnitLead({ unit: { partNumber, description, lot } }: { unit: Unit }) {
           </Link>
         </>
       )}
+      <br />
+      {shown.stage}, {shown.attempt === null ? 'not counted' : `attempt ${shown.attempt}`}, tested{' '}
+      <TimeText at={shown.startedAt} show="both" /> on {shown.station}
     </>
   );
 }

@@ -78,8 +78,9 @@ function StageStates({ stages }: { stages: UnitStageState[] }) {
   return (
     <span className={styles.stages}>
       {stages.map(({ stage, attempts, verdict }) => (
-        <span key={stage} className={styles.stage}>
+        <span key={stage} className={`${styles.stage} ${attempts === 0 ? styles.ahead : ''}`}>
           {verdict && <VerdictMark verdict={verdict} size={12} isWordHidden />} {stage}
+          {attempts === 0 && ' not yet'}
           {attempts > 1 && <span className={styles.attempts}> {attempts} attempts</span>}
         </span>
       ))}
