@@ -23,7 +23,7 @@ export function serveDashboard(app: NestExpressApplication, folder = dashboardFo
   app.use(express.static(folder, { index: false, maxAge: 0 }));
   app.use((request: Request, response: Response, next: NextFunction) => {
     const isPage =
-      request.method === 'GET' &&
+      (request.method === 'GET' || request.method === 'HEAD') &&
       !/^\/(api|docs)(\/|$)/.test(request.path) &&
       request.accepts('html') !== false;
     if (!isPage) next();
