@@ -50,7 +50,7 @@ export function countDelivery(tally: Tally, delivery: Delivery): void {
       tally.blocked = delivery.reason;
       break;
     case 'kept':
-      tally.lastTrouble = delivery.reason;
+      tally.lastTrouble ??= delivery.reason;
       break;
   }
 }

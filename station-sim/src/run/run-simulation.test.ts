@@ -39,7 +39,7 @@ function aSpool(leftOver: readonly SpooledPost[] = []) {
 }
 
 async function run(
-  options: { count?: number; seed?: number; scenario?: Scenario; start?: string } = {},
+  options: { count?: number; seed?: number; scenario?: Scenario; start?: string; stop?: AbortSignal } = {},
   send: PostResult = aHub().send,
   spool: Spool = aSpool().spool,
 ) {
@@ -57,7 +57,7 @@ async function run(
       spool,
       keys: { 'north-1': 'amk_1', 'north-2': 'amk_2', 'north-3': 'amk_3' },
       random,
-      stop: new AbortController().signal,
+      stop: options.stop ?? new AbortController().signal,
       onProgress: () => undefined,
     },
   );
@@ -123,6 +123,18 @@ describe('a simulation', () => {
     const tally = await run({ count: 10 }, down, spool);
     expect(tally).toMatchObject({ tested: 10, accepted: 0, waiting: 10 });
     expect(waiting.size).toBe(10);
+  });
+
+  it('ends soon when it is stopped, with everything kept', async () => {
+    const stop = new AbortController();
+    const { waiting, spool } = aSpool();
+    const down: PostResult = () => {
+      stop.abort();
+      return Promise.resolve({ kind: 'tryAgain', reason: 'down', retryAfterMs: null });
+    };
+    const tally = await run({ count: 0, stop: stop.signal }, down, spool);
+    expect(tally.tested).toBeLessThan(3);
+    expect(waiting.size).toBe(tally.tested);
   });
 
   it('sends first what an earlier run left behind', async () => {

@@ -75,8 +75,7 @@ export async function runSimulation(options: SimulationOptions, parts: Simulatio
     } else if (units.isEmpty() && underWay.size === 0) break;
     await clock.wait(1000 / options.testsPerSecond, stop);
   }
-  const drainMs = stop.aborted || tally.blocked ? DRAIN_STOPPED_MS : DRAIN_MS;
-  await settle(underWay, drainMs, clock, giveUp);
+  await settle(underWay, tally, parts, giveUp);
   return tally;
 }
 
@@ -85,16 +84,24 @@ function fromPlan(plan: Iterator<PlannedTest, void>): DueTest | null {
   return next.done ? null : { test: next.value, trial: 1, routedOn: 'hub' };
 }
 
-/** Waits for the posts under way, but no longer than `drainMs`; then they stay in the spool. */
+/** Gives the posts under way their while; what is not settled then stays in the spool. */
 async function settle(
   underWay: ReadonlySet<Promise<void>>,
-  drainMs: number,
-  clock: Clock,
+  tally: Tally,
+  { clock, stop }: SimulationParts,
   giveUp: AbortController,
 ): Promise<void> {
   const settled = new AbortController();
-  const all = Promise.all(underWay).finally(() => settled.abort());
-  await Promise.race([all, clock.wait(drainMs, settled.signal)]);
+  const hurry = new AbortController();
+  const all = Promise.all(underWay).finally(() => {
+    settled.abort();
+    hurry.abort();
+  });
+  const onStop = () => hurry.abort();
+  stop.addEventListener('abort', onStop, { once: true });
+  if (!stop.aborted && !tally.blocked) await clock.wait(DRAIN_MS, hurry.signal);
+  if (stop.aborted || tally.blocked) await clock.wait(DRAIN_STOPPED_MS, settled.signal);
+  stop.removeEventListener('abort', onStop);
   giveUp.abort();
   await all;
 }
