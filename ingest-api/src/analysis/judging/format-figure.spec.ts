@@ -1,3 +1,4 @@
+import fc from 'fast-check';
 import { formatBound, formatFigure, formatInterval, formatWithUncertainty } from './format-figure.js';
 
 describe('figures', () => {
@@ -20,6 +21,24 @@ describe('figures', () => {
     [3.2e-18, 'S', null, '0.0032 fS'],
   ])('%p %s ± %p is written %s', (value, unit, uncertainty, text) => {
     expect(formatFigure(value, unit, uncertainty)).toBe(text);
+  });
+
+  it('never fails on a finite figure', () => {
+    const anyFigure = fc.double({ min: -1e300, max: 1e300, noNaN: true });
+    fc.assert(
+      fc.property(anyFigure, anyFigure, fc.constantFrom('A', '%'), (value, other, unit) => {
+        const texts = [
+          formatFigure(value, unit),
+          formatFigure(value, unit, other),
+          formatWithUncertainty(value, unit, other),
+          formatInterval(Math.min(value, other), Math.max(value, other), unit),
+          formatBound(value, unit, 'atLeast'),
+          formatBound(value, unit, 'atMost'),
+        ];
+        expect(texts.join()).not.toMatch(/NaN|Infinity|undefined/);
+      }),
+      { numRuns: 1000 },
+    );
   });
 
   it('writes a value with its uncertainty under one prefix', () => {

@@ -14,6 +14,9 @@ const PREFIXES: ReadonlyMap<number, string> = new Map([
 ]);
 const PREFIXED_UNITS: ReadonlySet<string> = new Set(['A', 'V', 'Ω', 'S', 's', 'W', 'F']);
 
+/** Smaller figures mean nothing in any unit used here, and their powers of ten leave the range of numbers. */
+const SMALLEST = 1e-30;
+
 const UNCERTAINTY_DIGITS = 2;
 const DIGITS_WITHOUT_UNCERTAINTY = 6;
 const BOUND_DIGITS = 3;
@@ -32,14 +35,14 @@ interface Notation {
  *
  * Prefixes are used with A, V, Ω, S, s, W and F, never with %, ppm or ppm/V.
  *
- * @param value - in the unprefixed unit
+ * @param figure - in the unprefixed unit; below 10⁻³⁰ it is written as 0
  * @param unit - e.g. `Ω`, `ppm/V`
  * @param uncertainty - expanded uncertainty, same unit; null, 0 or left out when unknown
  * @throws RangeError when the value is not finite
  * @example formatFigure(12.1386e6, 'Ω', 0.29e6) // '12.14 MΩ'
  */
-export function formatFigure(value: number, unit: string, uncertainty?: number | null): string {
-  requireFinite(value);
+export function formatFigure(figure: number, unit: string, uncertainty?: number | null): string {
+  const value = readable(figure);
   if (isUsable(uncertainty)) {
     const notation = notationFor(value, unit, uncertainty);
     return withUnit(formatIn(notation, value), unit, notation);
@@ -53,9 +56,9 @@ export function formatFigure(value: number, unit: string, uncertainty?: number |
  *
  * @throws RangeError when the value is not finite
  */
-export function formatWithUncertainty(value: number, unit: string, uncertainty: number | null): string {
-  if (!isUsable(uncertainty)) return formatFigure(value, unit);
-  requireFinite(value);
+export function formatWithUncertainty(figure: number, unit: string, uncertainty: number | null): string {
+  if (!isUsable(uncertainty)) return formatFigure(figure, unit);
+  const value = readable(figure);
   const notation = notationFor(value, unit, uncertainty);
   const text = `${formatIn(notation, value)} ± ${formatIn(notation, uncertainty)}`;
   return withUnit(text, unit, notation);
@@ -66,9 +69,8 @@ export function formatWithUncertainty(value: number, unit: string, uncertainty: 
  *
  * @throws RangeError when an end is not finite
  */
-export function formatInterval(low: number, high: number, unit: string): string {
-  requireFinite(low);
-  requireFinite(high);
+export function formatInterval(lowEnd: number, highEnd: number, unit: string): string {
+  const [low, high] = [readable(lowEnd), readable(highEnd)];
   const halfWidth = Math.abs(high - low) / 2;
   if (!isUsable(halfWidth)) return formatFigure(low, unit);
   const notation = notationFor(Math.max(Math.abs(low), Math.abs(high)), unit, halfWidth);
@@ -81,9 +83,9 @@ export function formatInterval(low: number, high: number, unit: string): string 
  *
  * @example formatBound(894_427, 'Ω', 'atLeast') // 'at least 894 kΩ'
  */
-export function formatBound(value: number, unit: string, bound: Bound): string {
-  if (bound === 'exact') return formatFigure(value, unit);
-  requireFinite(value);
+export function formatBound(figure: number, unit: string, bound: Bound): string {
+  if (bound === 'exact') return formatFigure(figure, unit);
+  const value = readable(figure);
   const step = 10 ** (exponentOf(value) - (BOUND_DIGITS - 1));
   // A value that already ends on the step must not lose one to binary rounding.
   const steps = value / step;
@@ -141,9 +143,10 @@ function exponentOf(value: number): number {
 }
 
 function isUsable(uncertainty: number | null | undefined): uncertainty is number {
-  return typeof uncertainty === 'number' && Number.isFinite(uncertainty) && uncertainty > 0;
+  return typeof uncertainty === 'number' && Number.isFinite(uncertainty) && uncertainty >= SMALLEST;
 }
 
-function requireFinite(value: number): void {
-  if (!Number.isFinite(value)) throw new RangeError(`formatFigure requires a finite value, got ${value}`);
+function readable(figure: number): number {
+  if (!Number.isFinite(figure)) throw new RangeError(`formatFigure requires a finite value, got ${figure}`);
+  return Math.abs(figure) < SMALLEST ? 0 : figure;
 }

@@ -10,6 +10,7 @@ import {
   aProduct,
 } from './analysis.builder.js';
 import { describeJudgement } from './describe-judgement.js';
+import { MEASURE_NAMES } from './measure-names.js';
 import { judgeResult } from './judge-result.js';
 import { analyseSweep } from '../sweep/analyse-sweep.js';
 import { aSweep, pointsOf, steps } from '../sweep/sweep.builder.js';
@@ -400,6 +401,35 @@ describe('whole sweeps', () => {
       fc.property(slope, fc.double({ min: 0, max: 1, noNaN: true }), (worse, share) => {
         expect(verdictAt(worse * share)).toBeGreaterThanOrEqual(verdictAt(worse));
       }),
+    );
+  });
+});
+
+describe('any sweep that a station can post', () => {
+  const point = fc.record({
+    loadVolts: fc.double({ min: -60, max: 60, noNaN: true }),
+    outputAmps: fc.oneof(
+      fc.double({ min: -1e-3, max: 1e-3, noNaN: true }),
+      fc.constantFrom(0, 5e-4, 5.01e-4, 1e-300, 1e300),
+    ),
+    overload: fc.boolean(),
+  });
+  const limits = MEASURE_NAMES.flatMap((measure) => [
+    aLimit({ measure, lower: 0.5, upper: 1e7, rule: 'simple' }),
+  ]);
+
+  it('gets a verdict, probabilities from 0 to 1, and sentences without a hole', () => {
+    fc.assert(
+      fc.property(fc.array(point, { maxLength: 20 }), (points) => {
+        const { verdict, measures } = judge(analyseSweep(aSweep({ points })), limits);
+        expect(['pass', 'fail', 'notProven']).toContain(verdict);
+        for (const measure of measures) {
+          expect(measure.probabilityOfConformity ?? 0).toBeGreaterThanOrEqual(0);
+          expect(measure.probabilityOfConformity ?? 1).toBeLessThanOrEqual(1);
+          expect(describeJudgement(measure)).not.toMatch(/NaN|Infinity|null|undefined/);
+        }
+      }),
+      { numRuns: 500 },
     );
   });
 });
