@@ -50,6 +50,9 @@ export interface Evaluation {
  */
 const overloadCode = 9e36;
 
+/** No meter resolves less; what lies below is the dust of somebody's arithmetic, and would underflow in ours. */
+const smallestReading = 1e-30;
+
 /** Computes and judges a valid post: measures, verdict and flags. Pure. */
 export function evaluatePost(post: PostedResult, context: EvaluationContext): Evaluation {
   const { product, stage } = context;
@@ -78,7 +81,7 @@ export function analysePost(
 ): SweepAnalysis {
   const { spec } = context.product;
   return analyseSweep({
-    points: post.points.map(markOverload),
+    points: post.points.map(toSweepPoint),
     ammeter: mergeAmmeter(post.ammeter, context.ammeter),
     voltmeter: { inputOhms: post.voltmeter?.inputOhms, spansAmmeter: post.voltmeter?.spansAmmeter },
     fixtureLeakageOhms: post.fixtureLeakageOhms,
@@ -97,10 +100,14 @@ export function limitSiemensOf(limits: readonly Limit[], referenceAmps: number |
   return slope != null && referenceAmps !== null ? slope * 1e-6 * Math.abs(referenceAmps) : null;
 }
 
-function markOverload(point: PostedPoint): SweepPoint {
-  const beyond = Math.abs(point.outputAmps) >= overloadCode || Math.abs(point.loadVolts) >= overloadCode;
-  return beyond ? { ...point, overload: true } : point;
+function toSweepPoint(point: PostedPoint): SweepPoint {
+  const loadVolts = withoutDust(point.loadVolts);
+  const outputAmps = withoutDust(point.outputAmps);
+  const beyond = Math.abs(outputAmps) >= overloadCode || Math.abs(loadVolts) >= overloadCode;
+  return { ...point, loadVolts, outputAmps, ...(beyond ? { overload: true } : {}) };
 }
+
+const withoutDust = (reading: number): number => (Math.abs(reading) < smallestReading ? 0 : reading);
 
 function mergeAmmeter(
   posted: PostedAmmeter | undefined,

@@ -2,10 +2,16 @@ import { getNodePath, parseTree, visit, type JSONVisitor } from 'jsonc-parser';
 import { type ErrorPlace, MalformedError } from '../common/errors.js';
 
 const deepestNesting = 12;
+const mostErrors = 50;
+const longestName = 64;
 const utf8 = new TextDecoder('utf-8', { fatal: true });
 
+/** No name of the contract is longer; a stranger's megabyte shall not come back in every error. */
+export const shortened = (name: string): string =>
+  name.length <= longestName ? name : `${name.slice(0, longestName)}…`;
+
 export const pointerOf = (path: readonly (string | number)[]): string =>
-  path.map((part) => `/${String(part).replaceAll('~', '~0').replaceAll('/', '~1')}`).join('');
+  path.map((part) => `/${shortened(String(part)).replaceAll('~', '~0').replaceAll('/', '~1')}`).join('');
 
 /**
  * Reads a post's bytes as strict JSON (RFC 8259) in UTF-8. What JSON.parse would let pass silently is
@@ -71,45 +77,36 @@ function hiddenFaults(text: string): ErrorPlace[] {
     if (depth > deepestNesting)
       throw new MalformedError(`The JSON nests deeper than ${deepestNesting} levels.`);
   };
-  const checkText = (value: unknown, path: readonly (string | number)[]): void => {
-    if (typeof value === 'string' && !isWellFormed(value)) {
-      errors.push({
-        pointer: pointerOf(path),
-        code: 'text',
-        detail: 'This text holds half a surrogate pair.',
-      });
-    }
+  const leave = (): void => {
+    depth -= 1;
   };
+  const report = (path: readonly (string | number)[], code: string, detail: string): void => {
+    if (errors.length < mostErrors) errors.push({ pointer: pointerOf(path), code, detail });
+  };
+  const halfPair = 'This text holds half a surrogate pair.';
   const visitor: JSONVisitor = {
     onObjectBegin: () => {
       enter();
       names.push(new Set());
     },
     onObjectEnd: () => {
-      depth -= 1;
+      leave();
       names.pop();
     },
     onArrayBegin: enter,
-    onArrayEnd: () => {
-      depth -= 1;
-    },
+    onArrayEnd: leave,
     onObjectProperty: (name, _offset, _length, _line, _column, path) => {
-      const place = [...path(), name];
-      checkText(name, place);
-      const seen = names.at(-1);
-      if (seen?.has(name))
-        errors.push({
-          pointer: pointerOf(place),
-          code: 'duplicateName',
-          detail: `"${name.slice(0, 64)}" is given twice.`,
-        });
-      seen?.add(name);
+      if (!isWellFormed(name)) report([...path(), name], 'text', halfPair);
+      const seen = names.at(-1)!;
+      if (seen.has(name)) report([...path(), name], 'duplicateName', `"${shortened(name)}" is given twice.`);
+      seen.add(name);
     },
-    onLiteralValue: (value, _offset, _length, _line, _column, path) =>
-      checkText(value, typeof value === 'string' ? path() : []),
+    onLiteralValue: (value, _offset, _length, _line, _column, path) => {
+      if (typeof value === 'string' && !isWellFormed(value)) report(path(), 'text', halfPair);
+    },
   };
   visit(text, visitor);
-  return errors.slice(0, 50);
+  return errors;
 }
 
 const isWellFormed = (text: string): boolean => !/\p{Surrogate}/u.test(text);

@@ -1,25 +1,36 @@
 import type { ErrorObject } from 'ajv/dist/2020.js';
 import { createAjv } from '../common/create-ajv.js';
 import type { ErrorPlace } from '../common/errors.js';
-import { pointerOf } from './parse-post.js';
+import { pointerOf, shortened } from './parse-post.js';
 import schema from './result.schema.json';
 import type { PostedResult } from './result.types.js';
 
 export { schema as resultSchema };
 
 const check = createAjv({ verbose: true }).compile<PostedResult>(schema);
+/** For what is far too large to be a result: the first fault will do, all of them would take seconds. */
+const checkFirst = createAjv({ verbose: true, allErrors: false }).compile<PostedResult>(schema);
 const mostErrors = 50;
+/** 500 points with every property come to 5,000. */
+const mostValues = 10_000;
 
 /** Gives the places where a value breaks the result schema; none means that it is a PostedResult. */
 export function findFaults(value: unknown): ErrorPlace[] {
-  if (check(value)) return [];
-  const faults = (check.errors ?? []).filter((error) => error.keyword !== 'if').map(toPlace);
-  return faults.slice(0, mostErrors);
+  const validate = countValues(value) > mostValues ? checkFirst : check;
+  if (validate(value)) return [];
+  const faults = (validate.errors ?? []).filter((error) => error.keyword !== 'if');
+  return faults.slice(0, mostErrors).map(toPlace);
+}
+
+function countValues(value: unknown): number {
+  if (value === null || typeof value !== 'object') return 1;
+  return Object.values(value).reduce<number>((sum, inner) => sum + countValues(inner), 1);
 }
 
 function toPlace(error: ErrorObject): ErrorPlace {
-  const { keyword, instancePath, params } = error;
+  const { keyword, params } = error;
   const name = params as { missingProperty?: string; additionalProperty?: string; propertyName?: string };
+  const instancePath = error.instancePath.split('/').map(shortened).join('/');
   if (keyword === 'required') {
     return {
       pointer: instancePath + pointerOf([name.missingProperty ?? '']),
@@ -32,21 +43,36 @@ function toPlace(error: ErrorObject): ErrorPlace {
     return {
       pointer: instancePath + pointerOf([found]),
       code: 'unknownProperty',
-      detail: `"${found.slice(0, 64)}" is no property of this contract${suggestion(found, error)}. Values of your own go into "extra".`,
+      detail: `"${shortened(found)}" is no property of this contract${suggestion(found, error)}. Values of your own go into "extra".`,
     };
   }
   if (keyword === 'enum') {
     const allowed = (params as { allowedValues: unknown[] }).allowedValues.join(', ');
     return { pointer: instancePath, code: 'enum', detail: `Must be one of: ${allowed}.` };
   }
-  if (keyword === 'pattern') {
+  if (keyword === 'propertyNames') {
+    const found = name.propertyName ?? '';
     return {
-      pointer: instancePath,
-      code: 'pattern',
-      detail: 'Must hold no control characters and neither begin nor end with a space.',
+      pointer: instancePath + pointerOf([found]),
+      code: 'propertyNames',
+      detail: `"${shortened(found)}" can't be a name: ${namesAre}`,
     };
   }
+  if (keyword === 'format' || keyword === 'pattern') {
+    return { pointer: instancePath, code: keyword, detail: formDetail(error) };
+  }
   return { pointer: instancePath, code: keyword, detail: `This ${error.message ?? 'is not valid'}.` };
+}
+
+const namesAre = 'up to 64 characters, no control characters, no space at either end, not "." or "..".';
+
+/** What a text has to look like, in words; regular expressions are nobody's help. */
+function formDetail({ schemaPath, params }: ErrorObject): string {
+  const { format } = params as { format?: string };
+  if (format === 'date-time') return 'Must be an RFC 3339 time with zone, such as 2026-11-30T08:15:30.120Z.';
+  if (format === 'uuid' || schemaPath.includes('/resultId/'))
+    return 'Must be a UUID, such as 0193f3a2-6f0e-7c52-9a3e-5b1f4c0d2e11.';
+  return `Must be a name: ${namesAre}`;
 }
 
 /** "loadVolt" → did you mean "loadVolts"? Only when it is near enough to be a slip. */
