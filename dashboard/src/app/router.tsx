@@ -2,6 +2,7 @@ import { createBrowserRouter, type RouteObject } from 'react-router-dom';
 import { NotFound } from '@/components/errors/not-found';
 import { RouteError } from '@/components/errors/route-error';
 import { connectRoutes } from './connect-routes';
+import { decideRoutes } from './decide-routes';
 import { SignedInRoute } from './routes/signed-in';
 
 /** Nothing until the first page's chunk is there: it comes within a blink, and a flash of words would only distract. */
@@ -30,6 +31,7 @@ export const routes: RouteObject[] = [
             path: 'units/:partNumber/:serialNumber',
             lazy: async () => ({ Component: (await import('./routes/unit')).UnitRoute }),
           },
+          ...decideRoutes,
           ...connectRoutes,
           { path: '*', Component: NotFound },
         ],

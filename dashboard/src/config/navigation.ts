@@ -23,6 +23,6 @@ export const navigation: NavigationGroup[] = [
     ],
   },
   { label: 'Learn', entries: [] },
-  { label: 'Decide', entries: [] },
+  { label: 'Decide', entries: [{ label: 'Breaches', to: paths.breaches() }] },
   { label: 'Connect', entries: [{ label: 'Stations', to: paths.stations() }] },
 ];

@@ -16,7 +16,7 @@ export const paths = {
   intake: (query: Record<string, string> = {}) => withQuery('/intake', query),
   connect: () => '/connect',
   settings: () => '/settings',
-  mailbox: () => '/mailbox',
+  mailbox: (query: Record<string, string> = {}) => withQuery('/mailbox', query),
 };
 
 function withQuery(path: string, query: Record<string, string>): string {

@@ -1,0 +1,4 @@
+import { $api } from '@/lib/api-client';
+
+export const breachOptions = (breachId: number) =>
+  $api.queryOptions('get', '/api/v1/breaches/{breachId}', { params: { path: { breachId } } });
