@@ -34,7 +34,8 @@ export function analyseSweep(input: SweepInput): SweepAnalysis {
   const sameVolts = sameVoltageWithin(product);
   const points = preparePoints(input);
   const usable = usableByVoltage(points);
-  const resolution = resolveResolution(input.points, ammeter, product.nominalAmps);
+  const readings = usable.map((point) => input.points[point.index]!.outputAmps);
+  const resolution = resolveResolution(readings, ammeter, product.nominalAmps);
   const compliance = findCompliance(usable, product);
   const choice = chooseFitPoints(usable, compliance.fitLimitVolts, input);
   const { fit, steps, weightsUnused } = fitSweep(choice.points, sameVolts);

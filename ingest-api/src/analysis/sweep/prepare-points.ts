@@ -1,4 +1,4 @@
-import type { PreparedPoint, SweepInput, SweepPoint } from '../analysis.types.js';
+import type { PreparedPoint, SweepInput } from '../analysis.types.js';
 import { endTolerance } from './same-voltage.js';
 
 /** Meters report an overload as a huge number (9.9·10³⁷ by convention); no bench reaches this (V or A). */
@@ -13,7 +13,7 @@ const LARGEST_PLAUSIBLE = 1e6;
  * current runs through the ammeter and is counted already). Repeats are kept. A point is in range when V lies in
  * the promised range widened by 2 %.
  *
- * @returns one point for each posted one, in the same order, `inFit` still false; implausibly large readings
+ * @returns one point for each posted one, in the same order, `inFit` still false; implausibly large ones
  *   count as overload, their figures set to zero
  */
 export function preparePoints(input: SweepInput): PreparedPoint[] {
@@ -22,12 +22,13 @@ export function preparePoints(input: SweepInput): PreparedPoint[] {
   const { complianceLowVolts, complianceHighVolts } = input.product;
   const slack = endTolerance(input.product);
   return input.points.map((point, index) => {
-    const overload = point.overload === true || !isPlausible(point);
-    const loadVolts = plausible(point.loadVolts + (overload ? 0 : point.outputAmps * burdenOhms));
+    const loadVolts = point.loadVolts + point.outputAmps * burdenOhms;
+    const outputAmps = point.outputAmps + loadVolts * leakageSiemens;
+    const overload = point.overload === true || !isPlausible(loadVolts) || !isPlausible(outputAmps);
     return {
       index,
-      loadVolts,
-      outputAmps: plausible(point.outputAmps) + (overload ? 0 : loadVolts * leakageSiemens),
+      loadVolts: isPlausible(loadVolts) ? loadVolts : 0,
+      outputAmps: isPlausible(outputAmps) ? outputAmps : 0,
       direction: point.direction ?? null,
       elapsedMs: point.elapsedMs ?? null,
       outputAmpsStdDev: point.outputAmpsStdDev ?? null,
@@ -44,15 +45,11 @@ function parallelConductance({ voltmeter, fixtureLeakageOhms }: SweepInput): num
 }
 
 function conductanceOf(ohms: number | undefined): number {
-  return ohms !== undefined && ohms >= 1 / LARGEST_PLAUSIBLE ? 1 / ohms : 0;
+  return ohms !== undefined && ohms > 0 ? 1 / ohms : 0;
 }
 
-function isPlausible({ loadVolts, outputAmps }: SweepPoint): boolean {
-  return Math.abs(loadVolts) <= LARGEST_PLAUSIBLE && Math.abs(outputAmps) <= LARGEST_PLAUSIBLE;
-}
-
-function plausible(value: number): number {
-  return Math.abs(value) <= LARGEST_PLAUSIBLE ? value : 0;
+function isPlausible(reading: number): boolean {
+  return Math.abs(reading) <= LARGEST_PLAUSIBLE;
 }
 
 /** The points that carry a reading, by ascending voltage, then current: the order of the post is forgotten. */

@@ -1,4 +1,4 @@
-import type { AmmeterSpec, SweepPoint } from '../analysis.types.js';
+import type { AmmeterSpec } from '../analysis.types.js';
 
 /** No bench ammeter is taken to resolve finer than this share of its reading unless it says so (6½ digits). */
 const FINEST_ASSUMED = 1e-6;
@@ -19,15 +19,16 @@ export interface Resolution {
  * 0.06 mA); with identical readings the last decimal place they are written with (1.04 mA: 0.01 mA). It is taken
  * no finer than 10⁻⁶ of the largest reading, and never 0: readings of nothing but zeros get 0.1 % of the nominal
  * current. Cost: n log n.
+ *
+ * @param readings - currents as the meter gave them (A), overloads left out
  */
 export function resolveResolution(
-  points: readonly SweepPoint[],
+  readings: readonly number[],
   ammeter: AmmeterSpec,
   nominalAmps: number,
 ): Resolution {
   const stated = ammeter.resolutionAmps;
   if (stated !== undefined && stated > 0) return statedResolution(stated);
-  const readings = points.filter((point) => point.overload !== true).map((point) => point.outputAmps);
   const largest = readings.reduce((most, reading) => Math.max(most, Math.abs(reading)), 0);
   if (!(largest > 0)) {
     const step = 1e-3 * Math.abs(nominalAmps);

@@ -62,6 +62,7 @@ function lineThrough(points: readonly PreparedPoint[], product: ProductSpec): Se
   const line = theilSenLine(
     points.map((point) => point.loadVolts),
     points.map((point) => point.outputAmps),
+    sameVoltageWithin(product),
   );
   return { ...line, points };
 }
