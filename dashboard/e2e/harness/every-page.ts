@@ -1,0 +1,32 @@
+import type { Page } from 'playwright-core';
+import { paths } from '../../src/config/paths';
+import type { BreachPage, UnitPage } from '../../src/types/api';
+import { ask } from './api';
+
+/** The address of every page behind the sign-in, with things of the demonstration where a page shows one thing. */
+export async function everyPage(page: Page): Promise<string[]> {
+  const unit = await oneUnit(page, '/units?verdict=pass&limit=1');
+  const failed = await oneUnit(page, '/units?verdict=fail&limit=1');
+  const open = (await ask<BreachPage>(page, '/breaches?state=open')).items[0];
+  const closed = (await ask<BreachPage>(page, '/breaches?state=closed')).items[0];
+  if (!open || !closed) throw new Error('The demonstration has no open or no closed breach');
+  return [
+    paths.today(),
+    paths.units(),
+    paths.units({ search: 'nothing has this serial' }),
+    unit,
+    failed,
+    paths.stations(),
+    paths.station('north-1'),
+    paths.breaches(),
+    paths.breach(open.breachId),
+    paths.breach(closed.breachId),
+    '/no-such-page',
+  ];
+}
+
+async function oneUnit(page: Page, query: string): Promise<string> {
+  const unit = (await ask<UnitPage>(page, query)).items[0];
+  if (!unit) throw new Error(`The demonstration has no unit for ${query}`);
+  return paths.unit(unit.partNumber, unit.serialNumber);
+}

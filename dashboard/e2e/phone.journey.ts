@@ -1,0 +1,60 @@
+import type { Page } from 'playwright-core';
+import { expect } from 'vitest';
+import { expectAccessible } from './harness/accessibility';
+import { everyPage } from './harness/every-page';
+import { journey } from './harness/journey';
+import { openPage, pageIsThere } from './harness/open-page';
+import { signInAs } from './harness/sign-in';
+
+const phone = { viewport: { width: 390, height: 844 }, hasTouch: true, isMobile: true, deviceScaleFactor: 2 };
+
+journey(
+  'on a phone every page fits, places are behind the menu, and the chosen light stays',
+  async ({ page }) => {
+    await signInAs(page, 'productionEngineer');
+    await pageIsThere(page);
+    await expectAccessible(page);
+
+    await page.getByRole('button', { name: 'Menu' }).tap();
+    await expectAccessible(page);
+    await page.getByRole('link', { name: 'Units', exact: true }).tap();
+    await page.getByRole('heading', { level: 1, name: 'Units' }).waitFor();
+    await pageIsThere(page);
+    await page.getByRole('table').getByRole('link').first().tap();
+    await page.getByRole('img', { name: /Deviation from the reference current/ }).waitFor();
+    await pageIsThere(page);
+    await expectAccessible(page);
+
+    await choose(page, 'Night');
+    await page.reload();
+    expect(await light(page)).toBe('night');
+    await choose(page, 'Day');
+    await page.reload();
+    expect(await light(page)).toBe('day');
+
+    for (const address of await everyPage(page)) {
+      await openPage(page, address);
+      expect(await overflow(page), address).toEqual([]);
+    }
+  },
+  phone,
+);
+
+/** Presses the day or night switch at the foot of the menu. */
+async function choose(page: Page, label: 'Day' | 'Night'): Promise<void> {
+  await page.getByRole('button', { name: 'Menu' }).tap();
+  await page.getByText(label, { exact: true }).tap();
+  expect(await light(page)).toBe(label.toLowerCase());
+}
+
+const light = (page: Page) => page.evaluate(() => document.documentElement.dataset.theme);
+
+/** What stands out at the side of a page that can be moved sideways; nothing when it fits. */
+const overflow = (page: Page) =>
+  page.evaluate(() => {
+    const width = document.documentElement.clientWidth;
+    if ((document.scrollingElement?.scrollWidth ?? 0) <= width) return [];
+    return [...document.body.querySelectorAll('*')]
+      .filter((element) => element.getBoundingClientRect().right > width + 1)
+      .map((element) => element.outerHTML.slice(0, 120));
+  });
