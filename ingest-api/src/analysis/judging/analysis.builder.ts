@@ -1,4 +1,16 @@
-import type { Limit, Measure, OutputImpedance, ProductSpec, SweepAnalysis } from '../analysis.types.js';
+import type {
+  Limit,
+  Measure,
+  MeasureJudgement,
+  MeasureName,
+  OutputImpedance,
+  Outcome,
+  ProductSpec,
+  ResultJudgement,
+  SweepAnalysis,
+  Verdict,
+} from '../analysis.types.js';
+import { judgeResult } from './judge-result.js';
 
 /** Fixed values for specs; every call is a fresh object. */
 export function aProduct(overrides: Partial<ProductSpec> = {}): ProductSpec {
@@ -117,3 +129,37 @@ export function aLimit(overrides: Partial<Limit> = {}): Limit {
     ...overrides,
   };
 }
+
+/** A sweep whose conductance is ĝ ± U, in nS, with any measures besides impedance and compliance. */
+export function withSlope(conductance: number, uncertainty: number, ...measures: Measure[]): SweepAnalysis {
+  const impedance = anImpedance(conductance * 1e-9, uncertainty * 1e-9);
+  return anAnalysis({
+    impedance,
+    measures: [anImpedanceMeasure(impedance), ...measures, aComplianceMeasure()],
+  });
+}
+
+/** The judgement of one measure out of a result's. */
+export function judgementOf(measures: readonly MeasureJudgement[], name: MeasureName): MeasureJudgement {
+  const found = measures.find((measure) => measure.name === name);
+  if (found === undefined) throw new Error(`no measure ${name}`);
+  return found;
+}
+
+/** Judges as a result of the usual product. */
+export function judge(
+  analysis: SweepAnalysis,
+  limits: readonly Limit[] | null,
+  outcome: Outcome = 'completed',
+): ResultJudgement {
+  return judgeResult({ analysis, outcome, limits, product: aProduct() });
+}
+
+/** Verdicts from worst to best, for comparisons. */
+export const RANK: Readonly<Record<Verdict, number>> = {
+  fail: 0,
+  notProven: 1,
+  pass: 2,
+  unjudged: NaN,
+  aborted: NaN,
+};
