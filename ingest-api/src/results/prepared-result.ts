@@ -23,6 +23,9 @@ export interface PreparedResult {
   finishedAt: number | null;
   sentAt: number | null;
   receivedAt: number;
+  fixture: string | null;
+  programName: string | null;
+  programVersion: string | null;
   seeded: boolean;
   conductanceSiemens: number | null;
   conductanceUncertainty: number | null;

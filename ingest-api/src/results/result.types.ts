@@ -1,3 +1,4 @@
+import type { RunKind } from '../analysis/yield/yield.types.js';
 import type {
   Bound,
   Limit,
@@ -8,7 +9,7 @@ import type {
   Verdict,
 } from '../analysis/analysis.types.js';
 
-export type RunKind = 'production' | 'golden' | 'study' | 'practice';
+export type { RunKind };
 export type Disposition = 'next' | 'retest' | 'retestElsewhere' | 'repair' | 'hold' | 'stop';
 
 export interface PostedPoint {

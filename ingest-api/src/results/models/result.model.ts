@@ -33,6 +33,11 @@ export class Result extends Model {
   @Column(DataType.INTEGER) declare finishedAt: number | null;
   @Column(DataType.INTEGER) declare sentAt: number | null;
   @Column(DataType.INTEGER) declare receivedAt: number;
+  @Column(DataType.TEXT) declare fixture: string | null;
+  @Column(DataType.TEXT) declare programName: string | null;
+  @Column(DataType.TEXT) declare programVersion: string | null;
+  @Column(DataType.INTEGER) declare limitSetVersion: number | null;
+  @Column(DataType.INTEGER) declare testPlanVersion: number | null;
   @Column(booleanColumn('seeded')) declare seeded: boolean;
   @Column(DataType.INTEGER) declare voidedAt: number | null;
   @Column(DataType.REAL) declare conductanceSiemens: number | null;
