@@ -6,6 +6,9 @@ import { FakeEventSource } from './fake-event-source';
 // A page's first test also waits until its chunk is compiled.
 configure({ asyncUtilTimeout: 10_000 });
 
+// A busy machine may need seconds for what takes milliseconds; a test that passes never waits for this.
+configure({ asyncUtilTimeout: 15_000 });
+
 class NoObserver {
   observe() {}
   unobserve() {}

@@ -49,7 +49,10 @@ export function formatFigure(value: number, unit: string, options: FigureOptions
     return { sign: '', digits: plainDigits(scaled), uncertaintyDigits: null, unit: prefixedUnit };
   }
   const scaledUncertainty = uncertainty / 10 ** exponent;
-  const decimals = UNCERTAINTY_DIGITS - 1 - Math.floor(Math.log10(scaledUncertainty));
+  const decimals =
+    UNCERTAINTY_DIGITS -
+    1 -
+    Math.floor(Math.log10(Number(scaledUncertainty.toPrecision(UNCERTAINTY_DIGITS))));
   return {
     sign: '',
     digits: toPlace(scaled, decimals),
