@@ -8,6 +8,13 @@ import { AmpkeepError, MalformedError } from '../common/errors.js';
 export const largestPostBytes = 1_000_000;
 const inflate = promisify(gunzip);
 
+/** The body arrived whole, but can't be unpacked. */
+export class NotUnpackableError extends MalformedError {
+  constructor(readonly bytes: Buffer) {
+    super("The body says it is gzip but can't be unpacked.");
+  }
+}
+
 class TooLargeError extends AmpkeepError {
   constructor() {
     super(413, 'too_large', 'Too large', `A post may have up to ${largestPostBytes} bytes, unpacked.`);
@@ -29,7 +36,7 @@ export async function readJsonBytes(request: Request): Promise<Buffer> {
   if (!request.is('application/json')) {
     throw new UnsupportedMediaTypeError('Send the result with Content-Type: application/json.');
   }
-  const encoding = request.headers['content-encoding'] ?? 'identity';
+  const encoding = request.headers['content-encoding']?.toLowerCase() ?? 'identity';
   if (encoding !== 'identity' && encoding !== 'gzip') {
     throw new UnsupportedMediaTypeError(
       `Content-Encoding may be gzip or left out; "${encoding.slice(0, 40)}" is not read here.`,
@@ -53,6 +60,6 @@ async function unpack(bytes: Buffer): Promise<Buffer> {
     return await inflate(bytes, { maxOutputLength: largestPostBytes });
   } catch (error) {
     if ((error as { code?: string }).code === 'ERR_BUFFER_TOO_LARGE') throw new TooLargeError();
-    throw new MalformedError("The body says it is gzip but can't be unpacked.");
+    throw new NotUnpackableError(bytes);
   }
 }

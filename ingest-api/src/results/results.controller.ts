@@ -17,7 +17,6 @@ import { ResultDetailDto } from './dto/result-detail.dto.js';
 import { ResultPageDto } from './dto/result-page.dto.js';
 import { ResultQueryDto } from './dto/result-query.dto.js';
 import { examplePost } from './example-post.js';
-import { readJsonBytes } from './read-body.js';
 import { ResultReadsService } from './result-reads.service.js';
 import { ResultsService } from './results.service.js';
 
@@ -49,7 +48,7 @@ export class ResultsController {
     @CurrentStation() station: StationPrincipal,
     @Res({ passthrough: true }) response: Response,
   ): Promise<ResultAnswerDto> {
-    const { isNew, answer } = await this.results.record(await readJsonBytes(request), station);
+    const { isNew, answer } = await this.results.receive(request, station);
     response.status(isNew ? HttpStatus.CREATED : HttpStatus.OK);
     return answer;
   }

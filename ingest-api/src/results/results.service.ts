@@ -1,4 +1,5 @@
 import { Inject, Injectable } from '@nestjs/common';
+import type { Request } from 'express';
 import { DateTime } from 'luxon';
 import { BreachRecorder } from '../breaches/breach-recorder.js';
 import type { StationPrincipal } from '../auth/principals.js';
@@ -15,6 +16,7 @@ import { StationRegister } from '../stations/station-register.service.js';
 import { type EvaluationContext, evaluatePost } from './evaluate-post.js';
 import { ceilingOf } from './impedance-ceiling-of.js';
 import { parsePost } from './parse-post.js';
+import { NotUnpackableError, readJsonBytes } from './read-body.js';
 import { prepareResult } from './prepare-result.js';
 import type { PreparedResult } from './prepared-result.js';
 import { ResultWriter } from './result-writer.js';
@@ -54,6 +56,17 @@ export class ResultsService {
     @Inject(ENV) private readonly env: Env,
     @Inject(CLOCK) private readonly now: Clock,
   ) {}
+
+  /** Takes a station's request: as `record`, but what can't even be unpacked is kept in the intake, too. */
+  async receive(request: Request, station: StationPrincipal): Promise<Recorded> {
+    const bytes = await readJsonBytes(request).catch(async (error: unknown) => {
+      if (error instanceof NotUnpackableError) {
+        await this.refusedPosts.keep({ bytes: error.bytes, error, station, content: undefined });
+      }
+      throw error;
+    });
+    return this.record(bytes, station);
+  }
 
   /**
    * Takes a post as it came. Resolves after its commit.

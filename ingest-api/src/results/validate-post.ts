@@ -18,9 +18,13 @@ const mostValues = 10_000;
 export function findFaults(value: unknown): ErrorPlace[] {
   const validate = countValues(value) > mostValues ? checkFirst : check;
   if (validate(value)) return [];
-  const faults = (validate.errors ?? []).filter((error) => error.keyword !== 'if');
+  const faults = (validate.errors ?? []).filter(isWorthTelling);
   return faults.slice(0, mostErrors).map(toPlace);
 }
+
+/** `if` and what is wrong with a name say the same as the error that goes with them, in worse words. */
+const isWorthTelling = ({ keyword, propertyName }: ErrorObject): boolean =>
+  keyword !== 'if' && propertyName === undefined;
 
 function countValues(value: unknown): number {
   if (value === null || typeof value !== 'object') return 1;
