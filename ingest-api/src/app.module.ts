@@ -23,6 +23,7 @@ import { StationsModule } from './stations/stations.module.js';
 import { TodayModule } from './today/today.module.js';
 import { UnitsModule } from './units/units.module.js';
 import { UsersModule } from './users/users.module.js';
+import { YieldModule } from './yield/yield.module.js';
 
 @Module({})
 export class AppModule {
@@ -49,6 +50,7 @@ export class AppModule {
         ResultsModule,
         UnitsModule,
         TodayModule,
+        YieldModule,
         ProofModule,
         SiteModule,
         SiteSetupModule,

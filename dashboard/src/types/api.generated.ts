@@ -447,6 +447,23 @@ export interface paths {
         patch?: never;
         trace?: never;
     };
+    "/api/v1/yields": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        /** Yields over a period: trend, splits, failing measures, retests, aborts, what changed */
+        get: operations["Yield_report"];
+        put?: never;
+        post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
     "/api/v1/proof": {
         parameters: {
             query?: never;
@@ -502,6 +519,11 @@ export interface paths {
 export type webhooks = Record<string, never>;
 export interface components {
     schemas: {
+        AbortsDto: {
+            aborted: number;
+            /** @description All production runs, aborted ones included. */
+            total: number;
+        };
         AcknowledgeBreachDto: {
             /**
              * @description What you know and what you do next.
@@ -687,6 +709,16 @@ export interface components {
             code: string;
             text: string;
         };
+        CohortDto: {
+            firstPass: components["schemas"]["YieldDto"];
+            final: components["schemas"]["YieldDto"];
+            /** @description Units whose first attempt failed. */
+            failed: number;
+            /** @description Units whose first attempt could not be told. */
+            notProven: number;
+            /** @description Units that have not passed yet and may be tested again. */
+            openUnits: number;
+        };
         CreateApiKeyDto: {
             /**
              * @description What tells this key from the station's others.
@@ -752,6 +784,14 @@ export interface components {
             displayName: string;
             /** @enum {string} */
             role: "administrator" | "integrator" | "productionEngineer" | "qualityLead" | "viewer";
+        };
+        FailingMeasureDto: {
+            measure: string;
+            label: string;
+            /** @description First attempts that failed it. */
+            units: number;
+            /** @description Share of all named failures up to and including this one. */
+            cumulativeShare: number;
         };
         HealthDto: {
             status: string;
@@ -1231,6 +1271,16 @@ export interface components {
             /** @description Give it back as `cursor` for older ones; null at the end. */
             nextCursor: string | null;
         };
+        RetestsDto: {
+            /** @description Units tested more than once. */
+            retested: number;
+            total: number;
+            /**
+             * @description Of these, passed at the second attempt. Many of them, with nothing changed between, are a sign of a
+             *     measuring problem.
+             */
+            passedOnSecond: number;
+        };
         RightDto: {
             /**
              * @description Who may use it; `roles` names the people. `station`: with an API key, besides people, if any.
@@ -1509,12 +1559,61 @@ export interface components {
              */
             lastSignInAt: string | null;
         };
+        YieldBucketDto: {
+            firstPass: components["schemas"]["YieldDto"];
+            final: components["schemas"]["YieldDto"];
+            /** @description Units whose first attempt failed. */
+            failed: number;
+            /** @description Units whose first attempt could not be told. */
+            notProven: number;
+            /** @description Units that have not passed yet and may be tested again. */
+            openUnits: number;
+            startAt: string;
+            endAt: string;
+            /** @description Product of the stages' first-pass yields; only of a single product and all its stages. */
+            rolledThroughput: components["schemas"]["YieldDto"] | null;
+        };
         YieldDto: {
             passed: number;
             total: number;
             share: number | null;
             low: number | null;
             high: number | null;
+        };
+        YieldGroupDto: {
+            firstPass: components["schemas"]["YieldDto"];
+            final: components["schemas"]["YieldDto"];
+            /** @description Units whose first attempt failed. */
+            failed: number;
+            /** @description Units whose first attempt could not be told. */
+            notProven: number;
+            /** @description Units that have not passed yet and may be tested again. */
+            openUnits: number;
+            /** @description Null where the first attempt didn't say. */
+            name: string | null;
+            buckets: components["schemas"]["YieldDto"][];
+        };
+        YieldMarkerDto: {
+            at: string;
+            /** @enum {string} */
+            kind: "limitSet" | "program" | "testPlan";
+            text: string;
+        };
+        YieldReportDto: {
+            from: string;
+            to: string;
+            /** @enum {string} */
+            by: "day" | "hour" | "week";
+            timeZone: string;
+            whole: components["schemas"]["CohortDto"];
+            rolledThroughput: components["schemas"]["YieldDto"] | null;
+            buckets: components["schemas"]["YieldBucketDto"][];
+            /** @description Empty without a split; the largest first. */
+            groups: components["schemas"]["YieldGroupDto"][];
+            failingMeasures: components["schemas"]["FailingMeasureDto"][];
+            retests: components["schemas"]["RetestsDto"];
+            aborts: components["schemas"]["AbortsDto"];
+            markers: components["schemas"]["YieldMarkerDto"][];
         };
     };
     responses: never;
@@ -3468,6 +3567,76 @@ export interface operations {
             };
             /** @description Not allowed */
             403: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+            /** @description Too many requests; wait as `Retry-After` says */
+            429: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
+    };
+    Yield_report: {
+        parameters: {
+            query: {
+                /** @description First site day. */
+                from: string;
+                /** @description Last site day, itself included. */
+                to: string;
+                /** @description Width of a step of the trend. */
+                by?: "day" | "hour" | "week";
+                /** @description What the cohort is split by, besides. */
+                split?: "fixture" | "lot" | "product" | "programVersion" | "stage" | "station";
+                partNumber?: string;
+                stage?: string;
+                station?: string;
+                fixture?: string;
+                lot?: string;
+                programVersion?: string;
+            };
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["YieldReportDto"];
+                };
+            };
+            /** @description Not signed in, or no known API key */
+            401: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+            /** @description Not allowed */
+            403: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+            /** @description Readable, but not valid; see `errors` */
+            422: {
                 headers: {
                     [name: string]: unknown;
                 };

@@ -36,6 +36,7 @@ export const rights: Readonly<Record<string, Access>> = {
   'GET /api/v1/units': signedIn,
   'GET /api/v1/units/:partNumber/:serialNumber': signedIn,
   'GET /api/v1/today': signedIn,
+  'GET /api/v1/yields': signedIn,
   'GET /api/v1/products': signedIn,
 
   'GET /api/v1/stations': signedIn,
