@@ -47,7 +47,7 @@ function toPlace(error: ErrorObject): ErrorPlace {
     return {
       pointer: instancePath + pointerOf([found]),
       code: 'unknownProperty',
-      detail: `"${shortened(found)}" is no property of this contract${suggestion(found, error)}. Values of your own go into "extra".`,
+      detail: `"${shortened(found)}" is no property of this contract${suggestion(found, error)} Values of your own go into "extra".`,
     };
   }
   if (keyword === 'enum') {
@@ -79,11 +79,11 @@ function formDetail({ schemaPath, params }: ErrorObject): string {
   return `Must be a name: ${namesAre}`;
 }
 
-/** "loadVolt" → did you mean "loadVolts"? Only when it is near enough to be a slip. */
+/** Ends the sentence, for "loadVolt" with `did you mean "loadVolts"?`; only when it is near enough to be a slip. */
 function suggestion(found: string, error: ErrorObject): string {
   const known = Object.keys((error.parentSchema as { properties?: object } | undefined)?.properties ?? {});
   const near = known.find((candidate) => isNear(found.toLowerCase(), candidate.toLowerCase()));
-  return near === undefined ? '' : `; did you mean "${near}"?`;
+  return near === undefined ? '.' : `; did you mean "${near}"?`;
 }
 
 function isNear(left: string, right: string): boolean {
