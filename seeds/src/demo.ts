@@ -12,6 +12,7 @@ import { readyLines } from './launch/ready-lines.js';
 
 const TESTS_PER_SECOND = 0.4;
 const PATIENCE_MS = 10_000;
+const PARENT_LOOK_MS = 1000;
 
 const help = `Shows Ampkeep at work: loads the demonstration once, serves it, lets simulated stations post to it.
 
@@ -29,7 +30,8 @@ async function demonstrate(env: Env, withStations: boolean): Promise<void> {
   const server = startServer();
   const children = [server];
   try {
-    await Promise.race([server.saying(/^Ampkeep listens on /), stopped]);
+    const first = await Promise.race([server.saying(/^Ampkeep listens on /), stopped]);
+    if (first === 'signal') return;
     if (withStations) children.unshift(startStations(env));
     for (const line of readyLines(env, withStations ? 60 * TESTS_PER_SECOND : 0)) console.log(line);
     const ended = await Promise.race([server.ended.then(() => 'server' as const), stopped]);
@@ -64,10 +66,18 @@ function startStations(env: Env): Child {
   });
 }
 
-/** Resolves at the first Ctrl-C or SIGTERM; a second one ends the process as usual. */
+/**
+ * Resolves at the first Ctrl-C or SIGTERM; a second one ends the process as usual. npm's shell keeps a
+ * SIGTERM to itself, so under npm the end of the parent counts as one too.
+ */
 function stopSignal(): Promise<'signal'> {
   return new Promise((resolve) => {
+    const parent = process.ppid;
+    const watch = setInterval(() => {
+      if (process.env.npm_lifecycle_event && process.ppid !== parent) stop();
+    }, PARENT_LOOK_MS);
     const stop = () => {
+      clearInterval(watch);
       process.off('SIGINT', stop).off('SIGTERM', stop);
       resolve('signal');
     };
