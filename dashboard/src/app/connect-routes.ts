@@ -10,4 +10,12 @@ export const connectRoutes: RouteObject[] = [
     path: 'stations/:station',
     lazy: async () => ({ Component: (await import('./routes/station')).StationRoute }),
   },
+  {
+    path: 'intake',
+    lazy: async () => ({ Component: (await import('./routes/intake')).IntakeRoute }),
+  },
+  {
+    path: 'intake/refused/:intakeId',
+    lazy: async () => ({ Component: (await import('./routes/refused-post')).RefusedPostRoute }),
+  },
 ];

@@ -24,5 +24,11 @@ export const navigation: NavigationGroup[] = [
   },
   { label: 'Learn', entries: [] },
   { label: 'Decide', entries: [{ label: 'Breaches', to: paths.breaches() }] },
-  { label: 'Connect', entries: [{ label: 'Stations', to: paths.stations() }] },
+  {
+    label: 'Connect',
+    entries: [
+      { label: 'Stations', to: paths.stations() },
+      { label: 'Intake', to: paths.intake() },
+    ],
+  },
 ];

@@ -14,6 +14,7 @@ export const paths = {
   breaches: (query: Record<string, string> = {}) => withQuery('/breaches', query),
   breach: (breachId: number) => `/breaches/${breachId}`,
   intake: (query: Record<string, string> = {}) => withQuery('/intake', query),
+  refusedPost: (intakeId: string) => `/intake/refused/${encodeURIComponent(intakeId)}`,
   connect: () => '/connect',
   settings: () => '/settings',
   mailbox: (query: Record<string, string> = {}) => withQuery('/mailbox', query),

@@ -25,7 +25,8 @@ function subscribe(listener: () => void): () => void {
 }
 
 function read(): number {
-  if (!timer) now = Date.now();
+  // While nobody listens the time stands still but for whole ticks: two readings of one drawing must agree.
+  if (!timer && Date.now() - now >= TICK_MS) now = Date.now();
   return now;
 }
 

@@ -21,6 +21,7 @@ class NoObserver {
 // What jsdom lacks and the component library asks for while it is imported.
 HTMLCanvasElement.prototype.getContext = () => null;
 Element.prototype.scrollTo = () => {};
+Element.prototype.scrollIntoView = () => {};
 window.scrollTo = () => {};
 vi.stubGlobal('ResizeObserver', NoObserver);
 vi.stubGlobal('IntersectionObserver', NoObserver);
