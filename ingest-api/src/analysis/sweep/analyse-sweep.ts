@@ -1,4 +1,4 @@
-import type { LineFit, Measure, SweepAnalysis, SweepInput } from '../analysis.types.js';
+import type { LineFit, Measure, PreparedPoint, SweepAnalysis, SweepInput } from '../analysis.types.js';
 import { outputImpedance } from '../uncertainty/output-impedance.js';
 import { slopeUncertainty } from '../uncertainty/slope-uncertainty.js';
 import { chooseFitPoints } from './choose-fit-points.js';
@@ -6,7 +6,7 @@ import { complianceVoltage } from './compliance-voltage.js';
 import { findCurvature } from './curvature.js';
 import { findCompliance } from './find-compliance.js';
 import { driftAmps, findRepeatedPoint } from './find-drift.js';
-import { findFlags } from './find-flags.js';
+import { findFlags, type FlagEvidence } from './find-flags.js';
 import { fitSweep } from './fit-sweep.js';
 import { linearityError } from './linearity-error.js';
 import { loadRegulation } from './load-regulation.js';
@@ -30,22 +30,36 @@ import { sweepHysteresis } from './sweep-hysteresis.js';
  * Cost: quadratic in the number of points (500: a few milliseconds).
  */
 export function analyseSweep(input: SweepInput): SweepAnalysis {
+  const points = preparePoints(input);
+  const evidence = investigate(input, points);
+  const { findings } = evidence;
+  return {
+    points,
+    fit: findings.fit,
+    compliance: findings.compliance.finding,
+    slopeUncertainty: findings.slopeUncertainty,
+    impedance: findings.impedance,
+    measures: measuresOf(findings),
+    flags: findFlags(evidence),
+  };
+}
+
+function investigate(input: SweepInput, points: readonly PreparedPoint[]): FlagEvidence {
   const { product, ammeter } = input;
   const sameVolts = sameVoltageWithin(product);
-  const points = preparePoints(input);
   const usable = usableByVoltage(points);
   const readings = usable.map((point) => input.points[point.index]!.outputAmps);
   const resolution = resolveResolution(readings, ammeter, product.nominalAmps);
   const compliance = findCompliance(usable, product);
-  const choice = chooseFitPoints(usable, compliance.fitLimitVolts, input);
-  const { fit, steps, weightsUnused } = fitSweep(choice.points, sameVolts);
+  const { points: fitted, rangeChanged } = chooseFitPoints(usable, compliance.fitLimitVolts, input);
+  const { fit, steps, weightsUnused } = fitSweep(fitted, sameVolts);
   const findings: SweepFindings = {
     input,
     usable,
-    fitted: choice.points,
+    fitted,
     compliance,
     fit,
-    curvature: fit === null ? null : findCurvature(choice.points, fit, resolution.writtenStepAmps),
+    curvature: fit === null ? null : findCurvature(fitted, fit, resolution.writtenStepAmps),
     slopeReason: slopeReason(fit, compliance.finding.reason),
     slopeUncertainty: null,
     impedance: null,
@@ -55,22 +69,7 @@ export function analyseSweep(input: SweepInput): SweepAnalysis {
     endVolts: endTolerance(product),
   };
   addImpedance(findings);
-  return {
-    points,
-    fit,
-    compliance: compliance.finding,
-    slopeUncertainty: findings.slopeUncertainty,
-    impedance: findings.impedance,
-    measures: measuresOf(findings),
-    flags: findFlags({
-      findings,
-      points,
-      steps,
-      resolutionAssumed: resolution.assumed,
-      rangeChanged: choice.rangeChanged,
-      weightsUnused,
-    }),
-  };
+  return { findings, points, steps, resolutionAssumed: resolution.assumed, rangeChanged, weightsUnused };
 }
 
 function slopeReason(fit: LineFit | null, complianceReason: string | null): string | null {
