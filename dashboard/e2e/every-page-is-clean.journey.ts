@@ -3,6 +3,7 @@ import { expectAccessible } from './harness/accessibility';
 import { everyPage } from './harness/every-page';
 import { journey } from './harness/journey';
 import { openPage } from './harness/open-page';
+import { expectNoOverflow } from './harness/overflow';
 import { signInAs } from './harness/sign-in';
 
 journey('every page loads without complaint and is accessible by day and by night', async ({ page }) => {
@@ -11,6 +12,7 @@ journey('every page loads without complaint and is accessible by day and by nigh
   for (const address of addresses) {
     await openPage(page, address);
     expect(await page.getByRole('alert').allTextContents(), address).toEqual([]);
+    await expectNoOverflow(page);
     await expectAccessible(page);
   }
   const places = await page

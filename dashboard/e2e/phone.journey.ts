@@ -4,6 +4,7 @@ import { expectAccessible } from './harness/accessibility';
 import { everyPage } from './harness/every-page';
 import { journey } from './harness/journey';
 import { openPage, pageIsThere } from './harness/open-page';
+import { expectNoOverflow } from './harness/overflow';
 import { signInAs } from './harness/sign-in';
 
 const phone = { viewport: { width: 390, height: 844 }, hasTouch: true, isMobile: true, deviceScaleFactor: 2 };
@@ -34,7 +35,7 @@ journey(
 
     for (const address of await everyPage(page)) {
       await openPage(page, address);
-      expect(await overflow(page), address).toEqual([]);
+      await expectNoOverflow(page);
     }
   },
   phone,
@@ -43,18 +44,8 @@ journey(
 /** Presses the day or night switch at the foot of the menu. */
 async function choose(page: Page, label: 'Day' | 'Night'): Promise<void> {
   await page.getByRole('button', { name: 'Menu' }).tap();
-  await page.getByText(label, { exact: true }).tap();
+  await page.getByRole('radio', { name: label }).tap();
   expect(await light(page)).toBe(label.toLowerCase());
 }
 
 const light = (page: Page) => page.evaluate(() => document.documentElement.dataset.theme);
-
-/** What stands out at the side of a page that can be moved sideways; nothing when it fits. */
-const overflow = (page: Page) =>
-  page.evaluate(() => {
-    const width = document.documentElement.clientWidth;
-    if ((document.scrollingElement?.scrollWidth ?? 0) <= width) return [];
-    return [...document.body.querySelectorAll('*')]
-      .filter((element) => element.getBoundingClientRect().right > width + 1)
-      .map((element) => element.outerHTML.slice(0, 120));
-  });

@@ -1,6 +1,6 @@
 import type { Page } from 'playwright-core';
 import { paths } from '../../src/config/paths';
-import type { BreachPage, UnitPage } from '../../src/types/api';
+import type { BreachPage, IntakePage, UnitPage } from '../../src/types/api';
 import { ask } from './api';
 
 /** The address of every page behind the sign-in, with things of the demonstration where a page shows one thing. */
@@ -9,7 +9,8 @@ export async function everyPage(page: Page): Promise<string[]> {
   const failed = await oneUnit(page, '/units?verdict=fail&limit=1');
   const open = (await ask<BreachPage>(page, '/breaches?state=open')).items[0];
   const closed = (await ask<BreachPage>(page, '/breaches?state=closed')).items[0];
-  if (!open || !closed) throw new Error('The demonstration has no open or no closed breach');
+  const refused = (await ask<IntakePage>(page, '/intake?kind=refused')).items[0];
+  if (!open || !closed || !refused) throw new Error('The demonstration lacks a breach or a refused post');
   return [
     paths.today(),
     paths.units(),
@@ -21,6 +22,8 @@ export async function everyPage(page: Page): Promise<string[]> {
     paths.breaches(),
     paths.breach(open.breachId),
     paths.breach(closed.breachId),
+    paths.intake(),
+    paths.refusedPost(refused.intakeId),
     '/no-such-page',
   ];
 }

@@ -26,3 +26,11 @@ export async function simulate(server: Server, options: Record<string, string>):
 /** One station posts one unit whose output impedance is clearly too low. */
 export const postFailingUnit = (server: Server): Promise<void> =>
   simulate(server, { scenario: 'one-fail', stations: '1', seed: 'journey' });
+
+/** Posts a body as a station does. */
+export const post = (server: Server, key: string, body: string): Promise<Response> =>
+  fetch(`${server.url}/api/v1/results`, {
+    method: 'POST',
+    headers: { 'X-API-Key': key, 'Content-Type': 'application/json' },
+    body,
+  });
