@@ -35,6 +35,8 @@ export const rights: Readonly<Record<string, Access>> = {
   'GET /api/v1/results/:resultId/post': signedIn,
   'GET /api/v1/units': signedIn,
   'GET /api/v1/units/:partNumber/:serialNumber': signedIn,
+  'GET /api/v1/units/:partNumber/:serialNumber/route': { station: true, roles },
+  'GET /api/v1/test-plans/current': { station: true, roles },
   'GET /api/v1/today': signedIn,
   'GET /api/v1/yields': signedIn,
   'GET /api/v1/products': signedIn,

@@ -4,11 +4,12 @@ import { GoldenChecksService } from './golden-checks.service.js';
 import { StationActivityService } from './station-activity.service.js';
 import { StationRegister } from './station-register.service.js';
 import { StationsController } from './stations.controller.js';
+import { TestPlansController } from './test-plans.controller.js';
 import { StationsService } from './stations.service.js';
 
 @Module({
   imports: [ProductsModule],
-  controllers: [StationsController],
+  controllers: [StationsController, TestPlansController],
   providers: [StationRegister, StationActivityService, GoldenChecksService, StationsService],
   exports: [StationRegister, StationActivityService, GoldenChecksService],
 })

@@ -170,6 +170,23 @@ export interface paths {
         patch?: never;
         trace?: never;
     };
+    "/api/v1/test-plans/current": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        /** Load steps and limits in force now, and when a golden check is due */
+        get: operations["TestPlans_current"];
+        put?: never;
+        post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
     "/api/v1/stations/{station}/keys": {
         parameters: {
             query?: never;
@@ -422,6 +439,23 @@ export interface paths {
         };
         /** A unit's whole history, stage by stage */
         get: operations["Units_one"];
+        put?: never;
+        post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/v1/units/{partNumber}/{serialNumber}/route": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        /** May this unit be tested at this stage now? For stations */
+        get: operations["Units_route"];
         put?: never;
         post?: never;
         delete?: never;
@@ -777,6 +811,23 @@ export interface components {
              * @example amk_k7m2p9qx_6tR0…
              */
             key: string;
+        };
+        CurrentPlanDto: {
+            partNumber: string;
+            stage: string;
+            nominalAmps: number;
+            supplyVolts: number;
+            complianceLowVolts: number;
+            complianceHighVolts: number;
+            maxAttempts: number;
+            /** @description Safety caution of the product, if it needs one. */
+            caution: string | null;
+            testPlan: components["schemas"]["TestPlanDto"] | null;
+            limitSet: components["schemas"]["LimitSetDto"] | null;
+            /** @description Any of these proves the station. */
+            goldenSerialNumbers: string[];
+            /** @description Until when this station shall have measured a golden unit; the past when it is owed; null when none is asked for. */
+            goldenCheckDueAt: string | null;
         };
         DemoAccountDto: {
             email: string;
@@ -1502,6 +1553,26 @@ export interface components {
         UnitPageDto: {
             items: components["schemas"]["UnitItemDto"][];
             nextCursor: string | null;
+        };
+        UnitRouteDto: {
+            partNumber: string;
+            serialNumber: string;
+            stage: string;
+            mayBeTested: boolean;
+            /** @description Why not, in words; null when it may. */
+            reason: string | null;
+            /** @description Counted results at this stage so far. */
+            attempts: number;
+            attemptsLeft: number;
+            /**
+             * @description Of its latest attempt at this stage.
+             * @enum {string|null}
+             */
+            latestVerdict: "aborted" | "fail" | "notProven" | "pass" | "unjudged" | null;
+            priorStage: string | null;
+            /** @description Null when there is no prior stage. */
+            priorStagePassed: boolean | null;
+            lotHeld: boolean;
         };
         UnitStageDto: {
             stage: string;
@@ -2347,6 +2418,73 @@ export interface operations {
             };
             /** @description In conflict with what is stored */
             409: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+            /** @description Readable, but not valid; see `errors` */
+            422: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+            /** @description Too many requests; wait as `Retry-After` says */
+            429: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
+    };
+    TestPlans_current: {
+        parameters: {
+            query: {
+                partNumber: string;
+                stage: string;
+            };
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["CurrentPlanDto"];
+                };
+            };
+            /** @description Not signed in, or no known API key */
+            401: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+            /** @description Not allowed */
+            403: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+            /** @description Doesn't exist */
+            404: {
                 headers: {
                     [name: string]: unknown;
                 };
@@ -3521,6 +3659,76 @@ export interface operations {
             };
             /** @description Doesn't exist */
             404: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+            /** @description Too many requests; wait as `Retry-After` says */
+            429: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
+    };
+    Units_route: {
+        parameters: {
+            query: {
+                /** @description Where the unit stands. */
+                stage: string;
+            };
+            header?: never;
+            path: {
+                partNumber: string;
+                serialNumber: string;
+            };
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["UnitRouteDto"];
+                };
+            };
+            /** @description Not signed in, or no known API key */
+            401: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+            /** @description Not allowed */
+            403: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+            /** @description Doesn't exist */
+            404: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+            /** @description Readable, but not valid; see `errors` */
+            422: {
                 headers: {
                     [name: string]: unknown;
                 };
