@@ -1,4 +1,4 @@
-import { Inject, Injectable, type OnApplicationShutdown, type OnModuleInit } from '@nestjs/common';
+import { type BeforeApplicationShutdown, Inject, Injectable, type OnModuleInit } from '@nestjs/common';
 import { Interval } from '@nestjs/schedule';
 import { AuditService } from '../audit/audit.service.js';
 import type { StationPrincipal } from '../auth/principals.js';
@@ -15,7 +15,7 @@ const lastUseFlushMs = 30_000;
 
 /** Keys are few and asked for with every post: all of them are held in memory. */
 @Injectable()
-export class ApiKeysService implements OnModuleInit, OnApplicationShutdown {
+export class ApiKeysService implements OnModuleInit, BeforeApplicationShutdown {
   private byPrefix = new Map<string, ApiKey>();
   /** Last uses not yet written: one write per half minute, not per post. */
   private readonly unsavedUses = new Map<number, number>();
@@ -32,7 +32,7 @@ export class ApiKeysService implements OnModuleInit, OnApplicationShutdown {
     this.byPrefix = new Map(keys.map((key) => [key.prefix, key]));
   }
 
-  onApplicationShutdown(): Promise<void> {
+  beforeApplicationShutdown(): Promise<void> {
     return this.saveLastUses();
   }
 

@@ -21,6 +21,8 @@ import { Writer, WRITER_OPTIONS } from './writer.js';
           autoLoadModels: false,
           synchronize: false,
           retryAttempts: 0,
+          // The writer closes it, after all that waits was written.
+          autoCloseConnection: false,
         };
       },
     }),

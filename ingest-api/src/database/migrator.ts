@@ -20,6 +20,9 @@ export class NewerDatabaseError extends Error {
   }
 }
 
+const storageOf = (sequelize: Sequelize): SequelizeStorage =>
+  new SequelizeStorage({ sequelize, tableName: 'schema_changes' });
+
 export function createMigrator(
   sequelize: Sequelize,
   list: readonly Migration[] = migrations,
@@ -31,7 +34,7 @@ export function createMigrator(
       down: ({ context }) => down(context),
     })),
     context: sequelize.getQueryInterface(),
-    storage: new SequelizeStorage({ sequelize, tableName: 'schema_changes' }),
+    storage: storageOf(sequelize),
     logger: undefined,
   });
 }
@@ -41,9 +44,9 @@ export function createMigrator(
  * @throws NewerDatabaseError when the database is ahead of this version.
  */
 export async function migrate(sequelize: Sequelize): Promise<string[]> {
-  const migrator = createMigrator(sequelize);
   const known = new Set(migrations.map((migration) => migration.name));
-  const unknown = (await migrator.executed()).map((done) => done.name).filter((name) => !known.has(name));
+  // Asked of the table itself: the migrator's own list leaves out what it doesn't know.
+  const unknown = (await storageOf(sequelize).executed()).filter((name) => !known.has(name));
   if (unknown.length > 0) throw new NewerDatabaseError(unknown);
-  return (await migrator.up()).map((done) => done.name);
+  return (await createMigrator(sequelize).up()).map((done) => done.name);
 }

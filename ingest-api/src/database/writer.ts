@@ -73,9 +73,12 @@ export class Writer implements OnModuleInit, OnApplicationShutdown {
     }) as Promise<Outcome>;
   }
 
+  /** Last of all, when no request is under way any more: writes what waits and closes the database. */
   async onApplicationShutdown(): Promise<void> {
+    if (this.closed) return;
     this.closed = true;
     await this.draining;
+    await this.sequelize.close();
   }
 
   private enqueue(job: Pick<Job, 'handler' | 'item' | 'work'>): Promise<unknown> {
