@@ -1,7 +1,6 @@
 import { CustomChart, LineChart, ScatterChart } from 'echarts/charts';
 import { GridComponent, MarkAreaComponent, MarkLineComponent, TooltipComponent } from 'echarts/components';
 import * as echarts from 'echarts/core';
-import { LabelLayout } from 'echarts/features';
 import { SVGRenderer } from 'echarts/renderers';
 
 // Only what our charts use; another kind of chart registers its parts here.
@@ -13,7 +12,6 @@ echarts.use([
   TooltipComponent,
   MarkLineComponent,
   MarkAreaComponent,
-  LabelLayout,
   SVGRenderer,
 ]);
 

@@ -91,7 +91,7 @@ function prefixExponent(magnitude: number): number {
 function plainDigits(value: number): string {
   const digits = Number(value.toPrecision(PLAIN_DIGITS));
   return minus(
-    Math.abs(digits) >= 1e6 || (digits !== 0 && Math.abs(digits) < 1e-4)
+    Math.abs(digits) >= 1e9 || (digits !== 0 && Math.abs(digits) < 1e-4)
       ? digits.toExponential()
       : String(digits),
   );

@@ -14,7 +14,7 @@ export function Navigation({ children }: { children: ReactNode }) {
   const [openAt, setOpenAt] = useState<string | null>(null);
   const isOpen = openAt === pathname;
   return (
-    <div className={`${styles.column} no-print`}>
+    <header className={`${styles.column} no-print`}>
       <div className={styles.head}>
         <Link to={paths.today()} className={styles.home} aria-label="Ampkeep, today">
           <Wordmark />
@@ -34,7 +34,7 @@ export function Navigation({ children }: { children: ReactNode }) {
         <Places />
         <div className={styles.foot}>{children}</div>
       </div>
-    </div>
+    </header>
   );
 }
 

@@ -26,7 +26,9 @@ export function Shell({ strip, person, children }: ShellProps) {
         <ThemeSwitch />
         {person}
       </Navigation>
-      <div className={`${styles.strip} no-print`}>{strip}</div>
+      <section className={`${styles.strip} no-print`} aria-label="The line">
+        {strip}
+      </section>
       <main className={styles.page} id="page" ref={main} tabIndex={-1}>
         <ConnectionNotice />
         {children}

@@ -4,6 +4,8 @@ import styles from './data-table.module.css';
 export interface DataColumn<Row> {
   key: string;
   head: ReactNode;
+  /** The head as text beside the stacked cell, where `head` is more than text. */
+  headText?: string;
   cell: (row: Row) => ReactNode;
   align?: 'start' | 'end';
   /** The cell that names the row: a row header, first line of the stacked form on a phone. */
@@ -64,7 +66,7 @@ export function DataTable<Row>({
 }
 
 function Cell<Row>({ column, row }: { column: DataColumn<Row>; row: Row }) {
-  const label = typeof column.head === 'string' && !column.isSelfExplaining ? column.head : undefined;
+  const label = column.isSelfExplaining ? undefined : headText(column);
   return column.isRowHead ? (
     <th scope="row" className={cellClass(column)}>
       {column.cell(row)}
@@ -74,6 +76,10 @@ function Cell<Row>({ column, row }: { column: DataColumn<Row>; row: Row }) {
       {column.cell(row)}
     </td>
   );
+}
+
+function headText<Row>({ head, headText: text }: DataColumn<Row>): string | undefined {
+  return text ?? (typeof head === 'string' ? head : undefined);
 }
 
 function cellClass<Row>({ align, isTight }: DataColumn<Row>): string {

@@ -1,5 +1,6 @@
 import { Link } from 'react-router-dom';
 import { Impedance } from '@/components/ui/impedance';
+import { LabelTag } from '@/components/ui/label-tag';
 import { SlopeMark } from '@/components/ui/slope-mark';
 import { TimeText } from '@/components/ui/time-text';
 import { VerdictMark } from '@/components/ui/verdict-mark';
@@ -32,13 +33,21 @@ function attemptsText({ results, maxAttempts }: UnitStage): string {
   return `${counted} of at most ${maxAttempts} attempts`;
 }
 
-function attemptName({ attempt, outcome, runKind }: RunItem): string {
+const kinds: Record<RunItem['runKind'], string | null> = {
+  production: null,
+  golden: 'golden unit',
+  study: 'study',
+  practice: 'practice',
+};
+
+function attemptName({ attempt, outcome }: RunItem): string {
   if (attempt !== null) return `Attempt ${attempt}`;
-  return outcome === 'aborted' ? 'Aborted, not counted' : `Run of kind ${runKind}, not counted`;
+  return outcome === 'aborted' ? 'Aborted, not counted' : 'Not counted';
 }
 
 function Attempt({ run, isShown }: { run: RunItem; isShown: boolean }) {
   const name = attemptName(run);
+  const kind = kinds[run.runKind];
   return (
     <li className={styles.attempt} aria-current={isShown ? 'true' : undefined}>
       <SlopeMark slope={run.slope} size={48} />
@@ -47,6 +56,12 @@ function Attempt({ run, isShown }: { run: RunItem; isShown: boolean }) {
           <strong>{name}</strong>
         ) : (
           <Link to={paths.unit(run.partNumber, run.serialNumber, run.resultId)}>{name}</Link>
+        )}
+        {kind && (
+          <>
+            {' '}
+            <LabelTag>{kind}</LabelTag>
+          </>
         )}
         <span className={styles.when}>
           <TimeText at={run.startedAt} /> {run.station}

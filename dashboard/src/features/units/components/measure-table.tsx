@@ -1,5 +1,6 @@
 import { DataTable, type DataColumn } from '@/components/ui/data-table';
 import { Figure } from '@/components/ui/figure';
+import { Hint } from '@/components/ui/hint';
 import { VerdictMark } from '@/components/ui/verdict-mark';
 import type { JudgedMeasure, LimitInForce } from '@/types/api';
 import { figureText, probabilityText } from '@/utils/format-figure';
@@ -32,7 +33,12 @@ const columns: DataColumn<JudgedMeasure>[] = [
   },
   {
     key: 'probability',
-    head: 'Conforms with',
+    head: (
+      <Hint text="How probable it is, by the measurement and its uncertainty, that the true value keeps the limit.">
+        Conforms with
+      </Hint>
+    ),
+    headText: 'Conforms with',
     align: 'end',
     isTight: true,
     cell: ({ probabilityOfConformity: probability }) =>

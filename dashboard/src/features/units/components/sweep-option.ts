@@ -2,6 +2,7 @@ import type { ChartOption, ChartSeries } from '@/lib/chart-option';
 import type { ChartPalette } from '@/theme/chart-palette';
 import type { ResultDetail, Sweep } from '@/types/api';
 import { figureText } from '@/utils/format-figure';
+import { labelSeries } from './sweep-labels';
 import { earlierSeries, fitSeries, limitSeries, pointSeries } from './sweep-series';
 import { plotRange, type PlotRange } from './sweep-range';
 
@@ -14,6 +15,8 @@ export function sweepOption(
 ): ChartOption {
   const { sweep } = result;
   const range = plotRange([sweep, ...earlier.map((before) => before.sweep)], show);
+  const lowPpm = niceFloor(range.lowPpm);
+  const highPpm = niceCeil(range.highPpm);
   return {
     animation: false,
     grid: { left: 12, right: 76, top: 48, bottom: 34, containLabel: true },
@@ -32,8 +35,8 @@ export function sweepOption(
       nameLocation: 'end',
       nameGap: 26,
       nameTextStyle: { align: 'left' },
-      min: niceFloor(range.lowPpm),
-      max: niceCeil(range.highPpm),
+      min: lowPpm,
+      max: highPpm,
       axisLabel: { formatter: (ppm: number) => String(ppm).replace('-', '−') },
     },
     // Text from stations never becomes markup: the tip is drawn, not written into the page.
@@ -44,6 +47,7 @@ export function sweepOption(
       ...limitSeries(sweep, palette),
       ...fitSeries(sweep, palette),
       ...pointSeries(sweep, palette),
+      labelSeries(result, earlier, { ...range, lowPpm, highPpm }, palette),
     ],
   };
 }

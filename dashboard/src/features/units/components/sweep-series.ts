@@ -13,7 +13,7 @@ const EARLIER_DASHES = [
 ];
 const EARLIER_MARKERS = ['triangle', 'diamond', 'rect'];
 
-const byVolts = (points: SweepPoint[]) =>
+export const byVolts = (points: SweepPoint[]) =>
   points
     .filter(({ overload, deviationPpm }) => !overload && deviationPpm !== null)
     .sort((a, b) => a.loadVolts - b.loadVolts || a.index - b.index);
@@ -63,8 +63,6 @@ export function limitSeries(sweep: Sweep, palette: ChartPalette): ChartSeries[] 
       symbol: 'none',
       silent: true,
       lineStyle: { color: palette.fail, width: LIMIT_WIDTH, type: [10, 4] },
-      labelLayout: { moveOverlap: 'shiftY' },
-      endLabel: { show: true, formatter: 'limit', color: palette.fail, fontSize: 12 },
       data: sweep.limitLine.map(({ loadVolts, deviationPpm }) => [loadVolts, deviationPpm]),
     },
   ];
@@ -87,6 +85,7 @@ export function pointSeries(sweep: Sweep, palette: ChartPalette): ChartSeries[] 
           color: point.inFit ? palette.ink : palette.sheet,
           borderColor: palette.ink,
           borderWidth: 1.75,
+          opacity: 1,
         },
         tooltip: { formatter: () => pointText(point) },
       })),
@@ -94,13 +93,16 @@ export function pointSeries(sweep: Sweep, palette: ChartPalette): ChartSeries[] 
   ];
 }
 
+export const attemptLabel = ({ attempt, verdict }: Pick<ResultDetail, 'attempt' | 'verdict'>): string =>
+  attempt === null ? verdict : `attempt ${attempt}`;
+
 /** An earlier attempt at the same stage, each about its own reference current. */
 export function earlierSeries(
   { sweep, attempt, verdict }: ResultDetail,
   index: number,
   palette: ChartPalette,
 ): ChartSeries {
-  const name = attempt === null ? verdict : `attempt ${attempt}`;
+  const name = attemptLabel({ attempt, verdict });
   return {
     type: 'line',
     name,
@@ -113,8 +115,6 @@ export function earlierSeries(
       type: EARLIER_DASHES[index % EARLIER_DASHES.length] ?? 'dashed',
     },
     itemStyle: { color: palette.faded },
-    labelLayout: { moveOverlap: 'shiftY' },
-    endLabel: { show: true, formatter: name, color: palette.faded, fontSize: 12 },
     data: byVolts(sweep.points).map((point) => ({
       value: [point.loadVolts, point.deviationPpm ?? 0],
       tooltip: { formatter: () => `${name}\n${pointText(point)}` },
