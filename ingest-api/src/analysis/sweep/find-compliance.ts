@@ -169,6 +169,15 @@ function finding(
   crossing: ToleranceCrossing | null = null,
 ): ComplianceSearch {
   const fitHighVolts = Math.min(complianceHighVolts, Math.max(complianceLowVolts, fitLimitVolts));
-  const unknown = { kneeFound: false, complianceVolts: null, bound: 'exact', reason: null } as const;
-  return { finding: { ...unknown, fitHighVolts, ...known }, fitLimitVolts, crossing };
+  return {
+    finding: {
+      kneeFound: known.kneeFound ?? false,
+      complianceVolts: known.complianceVolts ?? null,
+      bound: known.bound ?? 'exact',
+      fitHighVolts,
+      reason: known.reason ?? null,
+    },
+    fitLimitVolts,
+    crossing,
+  };
 }

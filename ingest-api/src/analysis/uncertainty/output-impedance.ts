@@ -15,18 +15,15 @@ import type { OutputImpedance } from '../analysis.types.js';
  */
 export function outputImpedance(slopeSiemens: number, expandedSiemens: number): OutputImpedance {
   const conductance = 0 - slopeSiemens;
-  const known = {
-    estimateOhms: inverse(conductance),
-    conductanceSiemens: conductance,
-    expandedUncertaintySiemens: expandedSiemens,
-  };
-  if (conductance + expandedSiemens < 0) return { ...known, lowOhms: null, highOhms: null, bound: 'exact' };
+  const rising = conductance + expandedSiemens < 0;
   const highOhms = conductance > expandedSiemens ? inverse(conductance - expandedSiemens) : null;
   return {
-    ...known,
-    lowOhms: inverse(Math.abs(conductance) + expandedSiemens),
+    estimateOhms: inverse(conductance),
+    lowOhms: rising ? null : inverse(Math.abs(conductance) + expandedSiemens),
     highOhms,
-    bound: highOhms === null ? 'atLeast' : 'exact',
+    bound: rising || highOhms !== null ? 'exact' : 'atLeast',
+    conductanceSiemens: conductance,
+    expandedUncertaintySiemens: expandedSiemens,
   };
 }
 
