@@ -18,4 +18,8 @@ export const connectRoutes: RouteObject[] = [
     path: 'intake/refused/:intakeId',
     lazy: async () => ({ Component: (await import('./routes/refused-post')).RefusedPostRoute }),
   },
+  {
+    path: 'connect',
+    lazy: async () => ({ Component: (await import('./routes/connect')).ConnectRoute }),
+  },
 ];

@@ -29,6 +29,7 @@ export const navigation: NavigationGroup[] = [
     entries: [
       { label: 'Stations', to: paths.stations() },
       { label: 'Intake', to: paths.intake() },
+      { label: 'Docs', to: paths.connect() },
     ],
   },
 ];
