@@ -1,7 +1,9 @@
 import { useEffect, useRef } from 'react';
 
-/** A scanner types a key every few milliseconds; nobody types faster than this. */
-const LONGEST_GAP_MS = 45;
+/** A scanner types a key every few milliseconds; nobody keeps to less than this on average. */
+const AVERAGE_GAP_MS = 50;
+/** One key may come late, on a busy machine; a longer pause starts a new run. */
+const LONGEST_GAP_MS = 200;
 const SHORTEST_CODE = 5;
 
 function isEditable(target: EventTarget | null): boolean {
@@ -23,14 +25,16 @@ export function useBarcodeScan(onScan: (code: string) => void): void {
 
   useEffect(() => {
     let code = '';
+    let firstKeyAt = 0;
     let lastKeyAt = 0;
 
     const onKeyDown = (event: KeyboardEvent) => {
       if (isEditable(event.target) || event.ctrlKey || event.metaKey || event.altKey) return;
-      const isFast = event.timeStamp - lastKeyAt <= LONGEST_GAP_MS;
+      const isSameRun = event.timeStamp - lastKeyAt <= LONGEST_GAP_MS;
       lastKeyAt = event.timeStamp;
       if (event.key === 'Enter') {
-        if (isFast && code.length >= SHORTEST_CODE) {
+        const averageGap = (event.timeStamp - firstKeyAt) / code.length;
+        if (isSameRun && code.length >= SHORTEST_CODE && averageGap <= AVERAGE_GAP_MS) {
           // Else Enter would also press the button or link that has the focus.
           event.preventDefault();
           event.stopPropagation();
@@ -38,7 +42,8 @@ export function useBarcodeScan(onScan: (code: string) => void): void {
         }
         code = '';
       } else if (event.key.length === 1) {
-        code = isFast ? code + event.key : event.key;
+        if (!isSameRun || code === '') firstKeyAt = event.timeStamp;
+        code = isSameRun ? code + event.key : event.key;
       }
     };
 
