@@ -2,7 +2,13 @@ import { percent } from './coverage-shortfalls.js';
 import type { BenchReport, CoverageReport } from './run-coverage.js';
 
 /** The report of the coverage simulation as lines of text: a table of benches, one of knees, the shortfalls. */
-export function coverageLines({ benches, knees, trueBounds, shortfalls }: CoverageReport): string[] {
+export function coverageLines({
+  benches,
+  knees,
+  trueBounds,
+  allowance,
+  shortfalls,
+}: CoverageReport): string[] {
   return [
     'Coverage of the 95 % interval of the slope (covered, mean width over the 95 % quantile of the error)',
     '',
@@ -24,6 +30,9 @@ export function coverageLines({ benches, knees, trueBounds, shortfalls }: Covera
     '',
     `"At least" claims that are true: ${percent(trueBounds)}`,
     '',
+    ...(allowance > 0
+      ? [`A short run: figures may miss their aims by ${allowance} standard errors.`, '']
+      : []),
     ...(shortfalls.length === 0
       ? ['No figure falls short.']
       : shortfalls.map(
