@@ -3,6 +3,7 @@ import { ApiOperation, ApiTags } from '@nestjs/swagger';
 import { CurrentPerson } from '../auth/principal.decorators.js';
 import type { Person } from '../auth/principals.js';
 import { ApiProblems } from '../common/api-problems.decorator.js';
+import { NotFoundError } from '../common/errors.js';
 import { CLOCK, type Clock } from '../config/config.module.js';
 import { ApiKeysService } from './api-keys.service.js';
 import { ApiKeyDto, CreatedApiKeyDto, toApiKeyDto } from './dto/api-key.dto.js';
@@ -43,7 +44,8 @@ export class ApiKeysController {
   @ApiProblems(404)
   async revoke(
     @Param('station') station: string,
-    @Param('keyId', ParseIntPipe) keyId: number,
+    @Param('keyId', new ParseIntPipe({ exceptionFactory: () => new NotFoundError('A key of this number') }))
+    keyId: number,
     @CurrentPerson() person: Person,
   ): Promise<ApiKeyDto> {
     const key = await this.apiKeys.revoke(station, keyId, person.email);

@@ -1,4 +1,4 @@
-import { IsBoolean, IsISO8601, IsOptional, IsString, Length } from 'class-validator';
+import { IsBoolean, IsISO8601, IsOptional, IsRFC3339, IsString, Length, Matches } from 'class-validator';
 
 export class CreateApiKeyDto {
   /**
@@ -7,6 +7,7 @@ export class CreateApiKeyDto {
    */
   @IsString()
   @Length(1, 80)
+  @Matches(/\S/, { message: 'label must say something' })
   label!: string;
 
   /** A practice key's results are judged and shown, never counted. */
@@ -14,10 +15,11 @@ export class CreateApiKeyDto {
   practice!: boolean;
 
   /**
-   * When it stops working; null for never.
+   * When it stops working, RFC 3339 with zone; null for never.
    * @example "2027-12-01T00:00:00.000Z"
    */
   @IsOptional()
   @IsISO8601({ strict: true })
+  @IsRFC3339()
   expiresAt?: string | null;
 }
