@@ -130,6 +130,19 @@ describe('the intake', () => {
     expect((await page('kind=accepted')).items).toHaveLength(1);
   });
 
+  it('counts the reasons of small posts against the room, too', async () => {
+    await start({ AMPKEEP_REFUSED_QUOTA_MB: '1' });
+    const wrong = Object.fromEntries(
+      Array.from({ length: 50 }, (_, i) => [`misspelt-${'x'.repeat(45)}-${i}`, 1]),
+    );
+    for (let n = 0; n < 120; n += 1) await test.post({ ...wrong, n }).expect(422);
+    const { items } = await page('kind=refused&limit=200');
+    const bytes = items.reduce((sum, item) => sum + JSON.stringify(item.errors).length, 0);
+    expect(items.length).toBeLessThan(120);
+    expect(bytes).toBeGreaterThan(500_000);
+    expect(bytes).toBeLessThan(1_000_000);
+  });
+
   it('is read page by page without loss or repetition, whatever the page size', async () => {
     await start();
     for (let i = 0; i < 12; i += 1) {

@@ -12,6 +12,8 @@ import { LiveService } from '../live/live.service.js';
 
 /** A longer body is kept cut off: enough to see what is wrong, too little to fill the disk. */
 const keptBytes = 256_000;
+/** What a row takes besides its body and its reasons, roughly. */
+const rowBytes = 500;
 
 interface KeptPost {
   bytes: Buffer;
@@ -24,6 +26,9 @@ interface KeptPost {
 /** Keeps what came with a valid key and was refused, so that a person can see why and mend it. */
 @Injectable()
 export class RefusedPostsService {
+  /** What all kept posts take; null until it was asked for. A guess that is set right whenever it says "full". */
+  private storedBytes: number | null = null;
+
   constructor(
     private readonly writer: Writer,
     private readonly live: LiveService,
@@ -34,17 +39,24 @@ export class RefusedPostsService {
   /** The same body refused again only counts up. The oldest make room when the quota is full. */
   async keep(post: KeptPost): Promise<void> {
     const body = gzipSync(post.bytes.subarray(0, keptBytes));
+    const errors = JSON.stringify(post.error.errors);
+    const storedBytes = rowBytes + body.length + Buffer.byteLength(errors);
     await this.writer.run(async (transaction) => {
-      await this.insert(transaction, post, body);
-      await this.makeRoom(transaction);
+      await this.insert(transaction, post, { body, errors, storedBytes });
+      this.storedBytes = (this.storedBytes ?? (await totalBytes(transaction))) + storedBytes;
+      if (this.storedBytes > this.quota) this.storedBytes = await this.makeRoom(transaction);
     });
     this.live.publish({ topic: 'intake', id: null });
+  }
+
+  private get quota(): number {
+    return this.env.refusedQuotaMegabytes * 1_000_000;
   }
 
   private async insert(
     transaction: Transaction,
     { bytes, error, station, content }: KeptPost,
-    body: Buffer,
+    { body, errors, storedBytes }: { body: Buffer; errors: string; storedBytes: number },
   ): Promise<void> {
     const now = this.now();
     await runStatement(
@@ -60,37 +72,43 @@ export class RefusedPostsService {
       error.status,
       error.title,
       error.message,
-      JSON.stringify(error.errors),
+      errors,
       textOf(content, 'resultId'),
       textOf(content, 'partNumber'),
       textOf(content, 'serialNumber'),
       createHash('sha256').update(bytes).digest('hex'),
       body,
       bytes.length,
-      body.length,
+      storedBytes,
       bytes.length > keptBytes ? 1 : 0,
       now,
       now,
     );
   }
 
-  private async makeRoom(transaction: Transaction): Promise<void> {
-    const quota = this.env.refusedQuotaMegabytes * 1_000_000;
-    const [row] = await selectRows<{ bytes: number }>(
-      transaction,
-      'SELECT total(stored_bytes) AS bytes FROM refused_posts',
-    );
-    if (row!.bytes <= quota) return;
-    // Down to nine tenths, so that a full house isn't swept with every post.
-    await runStatement(
-      transaction,
-      `DELETE FROM refused_posts WHERE refused_post_id IN (
-         SELECT refused_post_id FROM (
-           SELECT refused_post_id, sum(stored_bytes) OVER (ORDER BY last_received_at DESC, refused_post_id DESC) AS newer_bytes
-           FROM refused_posts) WHERE newer_bytes > ?)`,
-      quota * 0.9,
-    );
+  /** Gives what is left. */
+  private async makeRoom(transaction: Transaction): Promise<number> {
+    if ((await totalBytes(transaction)) > this.quota) {
+      // Down to nine tenths, so that a full house isn't swept with every post.
+      await runStatement(
+        transaction,
+        `DELETE FROM refused_posts WHERE refused_post_id IN (
+           SELECT refused_post_id FROM (
+             SELECT refused_post_id, sum(stored_bytes) OVER (ORDER BY last_received_at DESC, refused_post_id DESC) AS newer_bytes
+             FROM refused_posts) WHERE newer_bytes > ?)`,
+        this.quota * 0.9,
+      );
+    }
+    return totalBytes(transaction);
   }
+}
+
+async function totalBytes(transaction: Transaction): Promise<number> {
+  const [row] = await selectRows<{ bytes: number }>(
+    transaction,
+    'SELECT total(stored_bytes) AS bytes FROM refused_posts',
+  );
+  return row!.bytes;
 }
 
 function textOf(content: unknown, name: string): string | null {

@@ -93,7 +93,7 @@ export const createResults: Migration = {
         last_received_at INTEGER NOT NULL,
         UNIQUE (station_id, status, body_sha256)
       ) STRICT`,
-      `CREATE INDEX refused_posts_last ON refused_posts (last_received_at)`,
+      `CREATE INDEX refused_posts_last ON refused_posts (last_received_at, stored_bytes)`,
     ]),
   down: (context) =>
     runScript(
