@@ -6,12 +6,12 @@ import { followLiveUpdates } from '@/lib/live-updates';
 /** Keeps what is on screen in step with the server while somebody is signed in. */
 export function LiveProvider({ children }: { children: ReactNode }) {
   const client = useQueryClient();
-  const [connection, setConnection] = useState<LiveConnection>({ state: 'connecting', since: 0 });
+  const [connection, setConnection] = useState<LiveConnection>({ state: 'connecting', lastHeardAt: 0 });
 
   useEffect(
     () =>
-      followLiveUpdates(client, (state) =>
-        setConnection((before) => (before.state === state ? before : { state, since: Date.now() })),
+      followLiveUpdates(client, (state, lastHeardAt) =>
+        setConnection((before) => (before.state === state ? before : { state, lastHeardAt })),
       ),
     [client],
   );

@@ -3,10 +3,10 @@ import type { LiveState } from './live-updates';
 
 export interface LiveConnection {
   state: LiveState;
-  /** Since when, in milliseconds. */
-  since: number;
+  /** When the server last gave a sign of life, in milliseconds, at the last change of state. */
+  lastHeardAt: number;
 }
 
-export const LiveContext = createContext<LiveConnection>({ state: 'connecting', since: 0 });
+export const LiveContext = createContext<LiveConnection>({ state: 'connecting', lastHeardAt: 0 });
 
 export const useLiveConnection = (): LiveConnection => useContext(LiveContext);

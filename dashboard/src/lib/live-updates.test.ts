@@ -8,6 +8,7 @@ const PRODUCTS = ['get', '/api/v1/products', {}];
 
 let client: QueryClient;
 let states: LiveState[];
+let lastHeardAt: number;
 let stop: () => void;
 const isStale = (queryKey: unknown[]) => client.getQueryState(queryKey)?.isInvalidated;
 
@@ -17,7 +18,10 @@ beforeEach(() => {
   client.setQueryData(TODAY, {});
   client.setQueryData(PRODUCTS, []);
   states = [];
-  stop = followLiveUpdates(client, (state) => states.push(state));
+  stop = followLiveUpdates(client, (state, heardAt) => {
+    states.push(state);
+    lastHeardAt = heardAt;
+  });
 });
 
 afterEach(() => {
@@ -55,10 +59,12 @@ describe('followLiveUpdates', () => {
     expect(isStale(PRODUCTS)).toBe(true);
   });
 
-  it('takes a silent line for a lost one', () => {
+  it('takes a silent line for a lost one, and knows when it was last heard', () => {
     FakeEventSource.latest().open();
+    const openedAt = Date.now();
     vi.advanceTimersByTime(40_000);
     expect(states.at(-1)).toBe('lost');
+    expect(lastHeardAt).toBe(openedAt);
   });
 
   it('closes the stream when nobody follows any more', () => {

@@ -12,13 +12,17 @@ export type LiveState = 'connecting' | 'live' | 'lost';
  * Follows the server's event stream: collects the topics of 250 ms into one invalidation, and after a break
  * invalidates everything, because events may have been missed.
  */
-export function followLiveUpdates(client: QueryClient, onState: (state: LiveState) => void): () => void {
+export function followLiveUpdates(
+  client: QueryClient,
+  onState: (state: LiveState, lastHeardAt: number) => void,
+): () => void {
   const topics = new Set<LiveTopic>();
   let source: EventSource | undefined;
   let flushTimer: ReturnType<typeof setTimeout> | undefined;
   let silenceTimer: ReturnType<typeof setTimeout> | undefined;
   let reopenTimer: ReturnType<typeof setTimeout> | undefined;
   let missedEvents = false;
+  let lastHeardAt = Date.now();
 
   const flush = () => {
     flushTimer = undefined;
@@ -28,13 +32,14 @@ export function followLiveUpdates(client: QueryClient, onState: (state: LiveStat
   };
 
   const heard = () => {
+    lastHeardAt = Date.now();
     clearTimeout(silenceTimer);
     silenceTimer = setTimeout(lost, SILENCE_MS);
   };
 
   const lost = () => {
     missedEvents = true;
-    onState('lost');
+    onState('lost', lastHeardAt);
     clearTimeout(silenceTimer);
     source?.close();
     clearTimeout(reopenTimer);
@@ -53,7 +58,7 @@ export function followLiveUpdates(client: QueryClient, onState: (state: LiveStat
     source = new EventSource('/api/v1/live');
     source.onopen = () => {
       heard();
-      onState('live');
+      onState('live', lastHeardAt);
       if (missedEvents) void client.invalidateQueries();
       missedEvents = false;
     };

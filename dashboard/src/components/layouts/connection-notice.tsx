@@ -5,15 +5,17 @@ import styles from './connection-notice.module.css';
 
 /** Says that the page has stopped following the line, and since when. */
 export function ConnectionNotice() {
-  const { state, since } = useLiveConnection();
+  const { state, lastHeardAt } = useLiveConnection();
   const { timeZone } = useSite();
   return (
     <div role="status">
       {state === 'lost' && (
         <p className={styles.notice}>
           Connection lost. What you see is as of{' '}
-          <span className="figures">{formatTime(new Date(since).toISOString(), timeZone, 'clock')}</span>;
-          this page keeps trying and will catch up by itself.
+          <span className="figures">
+            {formatTime(new Date(lastHeardAt).toISOString(), timeZone, 'clock')}
+          </span>
+          ; this page keeps trying and will catch up by itself.
         </p>
       )}
     </div>

@@ -1,5 +1,4 @@
 import { useQueries, useQuery } from '@tanstack/react-query';
-import { useMemo } from 'react';
 import { ErrorState } from '@/components/ui/error-state';
 import { Loading } from '@/components/ui/loading';
 import { Section } from '@/components/ui/section';
@@ -62,14 +61,13 @@ function Judging({ result }: { result: ResultDetail }) {
   );
 }
 
+/** Kept outside the component, so that the same answers give the same array and the chart is not drawn anew. */
+const loadedOnly = (queries: { data: ResultDetail | undefined }[]): ResultDetail[] =>
+  queries.flatMap(({ data }) => (data ? [data] : []));
+
 /** Results at the same stage before the shown one, at most three, oldest first. */
 function useEarlierResults(unit: Unit, shown: RunItem): ResultDetail[] {
   const results = unit.stages.find(({ stage }) => stage === shown.stage)?.results ?? [];
   const before = results.filter(({ startedAt }) => startedAt < shown.startedAt).slice(-MOST_OVERLAID);
-  const queries = useQueries({ queries: before.map(({ resultId }) => resultOptions(resultId)) });
-  const loaded = queries.flatMap(({ data }) => (data ? [data] : []));
-  // A new array in every render would draw the chart anew each time.
-  const key = loaded.map(({ resultId, verdict }) => `${resultId} ${verdict}`).join();
-  // eslint-disable-next-line react-hooks/exhaustive-deps
-  return useMemo(() => loaded, [key]);
+  return useQueries({ queries: before.map(({ resultId }) => resultOptions(resultId)), combine: loadedOnly });
 }
