@@ -35,7 +35,8 @@ export default tseslint.config(
       '@typescript-eslint/no-unused-vars': ['error', { argsIgnorePattern: '^_', ignoreRestSiblings: true }],
     },
   },
-  { files: ['**/*.spec.ts', '**/*.e2e-spec.ts', '**/*.test.ts', '**/*.test.tsx', 'ingest-api/test/**'],
+  {
+    files: ['**/*.spec.ts', '**/*.e2e-spec.ts', '**/*.test.ts', '**/*.test.tsx', 'ingest-api/test/**'],
     rules: {
       // supertest bodies and ECharts options are `any`; asserting on them is the point of a test.
       '@typescript-eslint/no-unsafe-assignment': 'off',
@@ -57,7 +58,11 @@ export default tseslint.config(
     '/(components|features|app)/',
     'lib, utils and theme stand below components, features and app.',
   ),
-  dashboardLayer(['dashboard/src/components/**/*.{ts,tsx}'], '/(features|app)/', 'components know no feature.'),
+  dashboardLayer(
+    ['dashboard/src/components/**/*.{ts,tsx}'],
+    '/(features|app)/',
+    'components know no feature.',
+  ),
   dashboardLayer(
     ['dashboard/src/features/**/*.{ts,tsx}'],
     '/(features/|app/)|^\\.\\./\\.\\./\\.\\./[a-z-]+/(api|components)',
