@@ -31,14 +31,13 @@ function BreachLine({ breach }: { breach: Breach }) {
   const { eventCount, latest, state, acknowledgedBy } = breach;
   return (
     <li className={styles.line}>
-      <TimeText at={breach.openedAt} show="relative" />
       <span className={styles.mark}>{latest && <SlopeMark slope={latest.slope} size={36} />}</span>
       <span>
         <Link to={paths.breach(breach.breachId)}>{breach.title}</Link>
         <span className={styles.state}>
-          {state === 'acknowledged' ? `acknowledged by ${acknowledgedBy ?? 'somebody'}` : 'nobody has it yet'}
-          , {eventCount} {eventCount === 1 ? 'event' : 'events'}, last{' '}
-          <TimeText at={breach.lastEventAt} show="relative" />
+          <TimeText at={breach.openedAt} show="relative" />, {eventCount}{' '}
+          {eventCount === 1 ? 'event' : 'events'},{' '}
+          {state === 'acknowledged' ? `${acknowledgedBy ?? 'somebody'} has it` : 'not acknowledged'}
         </span>
       </span>
     </li>

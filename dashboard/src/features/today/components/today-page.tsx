@@ -15,23 +15,23 @@ export function TodayPage({ today }: { today: Today }) {
     <>
       <PageHeader title="Today" lead={`${formatDay(today.date)}. ${todaySummary(today)}`} />
       <div className={styles.columns}>
-        <Section title="First-pass yield" note="bar: 95 % interval, stroke: share, flag: target">
-          {today.products.length > 0 ? (
-            <YieldFigure products={today.products} />
-          ) : (
-            <EmptyState title="No product is set up yet.">
-              Yields appear here with the first product.
-            </EmptyState>
-          )}
-        </Section>
         <div>
-          <Section title="Open breaches">
-            <BreachDayBook breaches={today.openBreaches} />
+          <Section title="First-pass yield" note="bar: 95 % interval, stroke: share, flag: target">
+            {today.products.length > 0 ? (
+              <YieldFigure products={today.products} />
+            ) : (
+              <EmptyState title="No product is set up yet.">
+                Yields appear here with the first product.
+              </EmptyState>
+            )}
           </Section>
           <Section title="Getting worse">
             <WorseList changes={today.worse} />
           </Section>
         </div>
+        <Section title="Open breaches">
+          <BreachDayBook breaches={today.openBreaches} />
+        </Section>
       </div>
       <div className={styles.run}>
         <Section title="Units as they come" note="the 30 newest results, newest first">

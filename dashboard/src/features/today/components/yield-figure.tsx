@@ -29,6 +29,9 @@ export function YieldFigure({ products }: { products: TodayProduct[] }) {
           <th scope="col">Target</th>
           <th scope="col">Pass · unproven · fail</th>
           <th scope="col" className={styles.end}>
+            After retests
+          </th>
+          <th scope="col" className={styles.end}>
             7 days before
           </th>
         </tr>
@@ -51,7 +54,7 @@ function ProductRow({ product: { partNumber, description, rolledThroughput } }: 
   const share = rolledThroughput?.share ?? null;
   return (
     <tr className={styles.product}>
-      <th scope="rowgroup" colSpan={6}>
+      <th scope="rowgroup" colSpan={7}>
         <span className="figures">{partNumber}</span>{' '}
         <span className={styles.description}>{description}</span>
         {share !== null && (

@@ -9,7 +9,7 @@ import styles from './yield-figure.module.css';
 const standings: Record<TargetStanding, string> = {
   below: 'below',
   met: 'met',
-  open: 'undecided',
+  open: '',
 };
 
 export interface YieldRowProps {
@@ -40,6 +40,10 @@ export function YieldRow({ partNumber, stage, scale }: YieldRowProps) {
         <Count count={stage.notProven} to={unitsWith('notProven')} word="not proven" />
         {' · '}
         <Count count={stage.failed} to={unitsWith('fail')} word="failed" />
+      </td>
+      <td className={`${styles.end} ${styles.final}`}>
+        {stage.final.share === null ? '–' : percentText(stage.final.share)}
+        {stage.openUnits > 0 && <span className={styles.open}> {stage.openUnits} open</span>}
       </td>
       <td className={`${styles.end} ${styles.previous}`}>
         {previous.share === null ? '–' : percentText(previous.share)}
