@@ -1,5 +1,7 @@
 import { randomUUID } from 'node:crypto';
 import { aFailingResult, aResult } from './builders.js';
+import { HeartbeatsService } from '../src/stations/heartbeats.service.js';
+import { Heartbeat } from '../src/stations/models/heartbeat.model.js';
 import { createTestApp, type TestApp } from './create-test-app.js';
 
 describe('what stations ask', () => {
@@ -89,6 +91,37 @@ describe('what stations ask', () => {
         )
         .expect(201);
       expect((await plan().expect(200)).body.goldenCheckDueAt).toBe('2026-12-01T09:00:00.000Z');
+    });
+  });
+
+  describe('POST /api/v1/heartbeats', () => {
+    const beat = (body: object) => test.http.post('/api/v1/heartbeats').set('X-API-Key', key).send(body);
+    const northTwo = async () => {
+      const viewer = await test.as('viewer');
+      const { body } = await viewer.get('/api/v1/stations').expect(200);
+      return body.find((station: { station: string }) => station.station === 'north-2');
+    };
+
+    it("answers the server's time and how far the station's clock is off", async () => {
+      const sentAt = new Date(test.clock.now - 95_000).toISOString();
+      const { body } = await beat({ sentAt }).expect(200);
+      expect(body).toEqual({ serverTime: new Date(test.clock.now).toISOString(), clockSkewSeconds: 95 });
+      expect(await northTwo()).toMatchObject({
+        lastHeartbeatAt: body.serverTime,
+        clockSkewSeconds: 95,
+        state: expect.any(String),
+      });
+    });
+
+    it('is content with no time at all, and refuses one that is none', async () => {
+      expect((await beat({}).expect(200)).body.clockSkewSeconds).toBeNull();
+      expect((await beat({ sentAt: 'yesterday' }).expect(422)).body.errors[0].pointer).toBe('/sentAt');
+    });
+
+    it('outlives the server by its next save', async () => {
+      await beat({}).expect(200);
+      await test.app.get(HeartbeatsService, { strict: false }).save();
+      expect((await Heartbeat.findAll()).map(({ at }) => at)).toEqual([test.clock.now]);
     });
   });
 });

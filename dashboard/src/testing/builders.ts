@@ -177,6 +177,7 @@ export function aStation(overrides: Partial<Station> = {}): Station {
     active: true,
     state: 'posting',
     lastPostAt: '2026-11-30T08:15:42.100Z',
+    lastHeartbeatAt: null,
     latest: aRun(),
     postsToday: 212,
     refusedToday: 0,

@@ -187,6 +187,23 @@ export interface paths {
         patch?: never;
         trace?: never;
     };
+    "/api/v1/heartbeats": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        /** Say that the station lives; the answer is the server's time */
+        post: operations["Heartbeats_beat"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
     "/api/v1/stations/{station}/keys": {
         parameters: {
             query?: never;
@@ -762,7 +779,7 @@ export interface components {
             /** @description A practice key's results are judged and shown, never counted. */
             practice: boolean;
             /**
-             * @description When it stops working; null for never.
+             * @description When it stops working, RFC 3339 with zone; null for never.
              * @example 2027-12-01T00:00:00.000Z
              */
             expiresAt?: string | null;
@@ -847,6 +864,12 @@ export interface components {
         HealthDto: {
             status: string;
             version: string;
+        };
+        HeartbeatDto: {
+            /** @description Set the station's clock by it. */
+            serverTime: string;
+            /** @description Server minus station; null without sentAt. */
+            clockSkewSeconds: number | null;
         };
         InstrumentDto: {
             /** @enum {string} */
@@ -986,6 +1009,13 @@ export interface components {
             sentAt: string | null;
             /** @description What the mail server said to the last try. */
             lastError: string | null;
+        };
+        PostHeartbeatDto: {
+            /**
+             * @description The station's own clock; shows how far it is off.
+             * @example 2026-11-30T08:15:42.010Z
+             */
+            sentAt?: string;
         };
         PostedCelsius: number;
         PostedName: string;
@@ -1425,6 +1455,7 @@ export interface components {
              */
             state: "neverPosted" | "posting" | "quiet";
             lastPostAt: string | null;
+            lastHeartbeatAt: string | null;
             latest: components["schemas"]["RunItemDto"] | null;
             postsToday: number;
             refusedToday: number;
@@ -2485,6 +2516,74 @@ export interface operations {
             };
             /** @description Doesn't exist */
             404: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+            /** @description Readable, but not valid; see `errors` */
+            422: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+            /** @description Too many requests; wait as `Retry-After` says */
+            429: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
+    };
+    Heartbeats_beat: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": components["schemas"]["PostHeartbeatDto"];
+            };
+        };
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["HeartbeatDto"];
+                };
+            };
+            /** @description Not readable as what it should be */
+            400: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+            /** @description Not signed in, or no known API key */
+            401: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+            /** @description Not allowed */
+            403: {
                 headers: {
                     [name: string]: unknown;
                 };

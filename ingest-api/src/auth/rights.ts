@@ -36,6 +36,7 @@ export const rights: Readonly<Record<string, Access>> = {
   'GET /api/v1/units': signedIn,
   'GET /api/v1/units/:partNumber/:serialNumber': signedIn,
   'GET /api/v1/units/:partNumber/:serialNumber/route': { station: true, roles },
+  'POST /api/v1/heartbeats': station,
   'GET /api/v1/test-plans/current': { station: true, roles },
   'GET /api/v1/today': signedIn,
   'GET /api/v1/yields': signedIn,

@@ -14,6 +14,7 @@ import { Lot } from '../results/models/lot.model.js';
 import { ResultBody } from '../results/models/result-body.model.js';
 import { Result } from '../results/models/result.model.js';
 import { Unit } from '../results/models/unit.model.js';
+import { Heartbeat } from '../stations/models/heartbeat.model.js';
 import { Instrument } from '../stations/models/instrument.model.js';
 import { Station } from '../stations/models/station.model.js';
 import { Session } from '../users/models/session.model.js';
@@ -26,6 +27,7 @@ export const models: ModelCtor[] = [
   Breach,
   BreachEvent,
   GoldenUnit,
+  Heartbeat,
   Instrument,
   LimitSet,
   Lot,

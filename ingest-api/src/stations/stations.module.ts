@@ -1,6 +1,8 @@
 import { Module } from '@nestjs/common';
 import { ProductsModule } from '../products/products.module.js';
 import { GoldenChecksService } from './golden-checks.service.js';
+import { HeartbeatsController } from './heartbeats.controller.js';
+import { HeartbeatsService } from './heartbeats.service.js';
 import { StationActivityService } from './station-activity.service.js';
 import { StationRegister } from './station-register.service.js';
 import { StationsController } from './stations.controller.js';
@@ -9,8 +11,14 @@ import { StationsService } from './stations.service.js';
 
 @Module({
   imports: [ProductsModule],
-  controllers: [StationsController, TestPlansController],
-  providers: [StationRegister, StationActivityService, GoldenChecksService, StationsService],
+  controllers: [StationsController, TestPlansController, HeartbeatsController],
+  providers: [
+    StationRegister,
+    StationActivityService,
+    GoldenChecksService,
+    HeartbeatsService,
+    StationsService,
+  ],
   exports: [StationRegister, StationActivityService, GoldenChecksService],
 })
 export class StationsModule {}

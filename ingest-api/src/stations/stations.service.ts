@@ -18,7 +18,7 @@ import { Station } from './models/station.model.js';
 import { type StationActivity, StationActivityService } from './station-activity.service.js';
 import { StationRegister } from './station-register.service.js';
 
-const postingMs = 10 * 60_000;
+const POSTING_MS = 10 * 60_000;
 
 @Injectable()
 export class StationsService {
@@ -65,16 +65,17 @@ export class StationsService {
   }
 
   private describe(activity: StationActivity): Omit<StationDto, 'latest'> {
-    const { station, lastPostAt } = activity;
+    const { station, lastPostAt, lastHeartbeatAt } = activity;
     const { stationId, line, active } = this.register.byId(activity.stationId);
     const state =
-      lastPostAt === null ? 'neverPosted' : this.now() - lastPostAt <= postingMs ? 'posting' : 'quiet';
+      lastPostAt === null ? 'neverPosted' : this.now() - lastPostAt <= POSTING_MS ? 'posting' : 'quiet';
     return {
       station,
       line,
       active,
       state,
       lastPostAt: lastPostAt === null ? null : new Date(lastPostAt).toISOString(),
+      lastHeartbeatAt: lastHeartbeatAt === null ? null : new Date(lastHeartbeatAt).toISOString(),
       postsToday: activity.postsToday,
       refusedToday: activity.refusedToday,
       clockSkewSeconds: activity.clockSkewSeconds,

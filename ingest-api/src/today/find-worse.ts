@@ -3,7 +3,7 @@ import type { StationActivity } from '../stations/station-activity.service.js';
 import type { TodayChangeDto, TodayProductDto, TodayStageDto } from './dto/today.dto.js';
 
 /** A station that worked today and then said nothing for this long fell silent. */
-const silenceMs = 30 * 60_000;
+const SILENCE_MS = 30 * 60_000;
 const percent = (share: number): string => `${(100 * share).toFixed(1)} %`;
 
 /**
@@ -27,7 +27,7 @@ export function findWorse(
     }
   }
   for (const { station, lastPostAt } of stations) {
-    if (lastPostAt === null || lastPostAt < dayStart || now - lastPostAt < silenceMs) continue;
+    if (lastPostAt === null || lastPostAt < dayStart || now - lastPostAt < SILENCE_MS) continue;
     const minutes = Math.round((now - lastPostAt) / 60_000);
     changes.push({
       kind: 'silent',
@@ -52,10 +52,10 @@ function firstPassText({ firstPass, previous }: TodayStageDto): string | null {
 }
 
 /** One in twenty is what an adequate meter should never reach. */
-const tolerableNotProven = 0.05;
+const TOLERABLE_NOT_PROVEN = 0.05;
 
 function notProvenText({ notProven, firstPass: { total } }: TodayStageDto): string | null {
   const interval = total === 0 ? null : wilsonInterval(notProven, total);
-  if (interval === null || interval.low <= tolerableNotProven) return null;
+  if (interval === null || interval.low <= TOLERABLE_NOT_PROVEN) return null;
   return `${notProven} of ${total} first attempts could not be proven: check ranges and meters`;
 }

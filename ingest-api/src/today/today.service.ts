@@ -16,8 +16,8 @@ import { findStageYields } from '../yield/stage-yields.queries.js';
 import { TodayDto, type TodayProductDto, type TodayStageDto, type YieldDto } from './dto/today.dto.js';
 import { findWorse } from './find-worse.js';
 
-const recentCount = 30;
-const daysBefore = 7;
+const RECENT_COUNT = 30;
+const DAYS_BEFORE = 7;
 
 type CountsByStage = Map<number, YieldCounts>;
 
@@ -38,9 +38,9 @@ export class TodayService {
     const start = now.startOf('day');
     const [counts, before, openBreaches, recent, stations] = await Promise.all([
       this.counts(start, start.plus({ days: 1 })),
-      this.counts(start.minus({ days: daysBefore }), start),
+      this.counts(start.minus({ days: DAYS_BEFORE }), start),
       this.breaches.findUnclosed(50),
-      this.results.newest({}, recentCount),
+      this.results.newest({}, RECENT_COUNT),
       this.activity.all(),
     ]);
     const products = this.catalogue.all().map((product) => toProduct(product, counts, before));

@@ -22,6 +22,7 @@ export class StationDto {
   /** `posting`: within the last ten minutes. */
   state!: 'posting' | 'quiet' | 'neverPosted';
   lastPostAt!: string | null;
+  lastHeartbeatAt!: string | null;
   latest!: RunItemDto | null;
   postsToday!: number;
   refusedToday!: number;
