@@ -29,7 +29,8 @@ type Decision = Pick<MeasureJudgement, 'outcome' | 'probabilityOfConformity' | '
  * The compliance voltage has a rule of its own: without a point outside the tolerance only "at least the highest
  * tested" is known. That passes when the highest tested reaches the limit, or when the limit is no higher than the
  * promised range and the sweep counts as covering it (95 %); else it is `notProven`, never a fail. An output
- * without current holds it up to no voltage, so it fails (`noCurrent`), however flat its characteristic is.
+ * without current holds it up to no voltage, so it fails (`noCurrent`), wherever it was tested and however flat its
+ * characteristic is.
  *
  * @see ISO 14253-1 (guarded); JCGM 106:2012, clause 8 (decision rules)
  */
@@ -90,7 +91,7 @@ function decide(measure: Measure, limit: Limit, analysis: SweepAnalysis, product
   return {
     outcome,
     probabilityOfConformity: quantity.probabilityOfConformity,
-    reason: outcome === 'notProven' ? 'guardBand' : reasonBehind(measure, analysis),
+    reason: outcome === 'notProven' ? 'guardBand' : measure.reason,
   };
 }
 
@@ -101,6 +102,9 @@ function decideCompliance(
   analysis: SweepAnalysis,
   product: ProductSpec,
 ): Decision | null {
+  if (analysis.compliance.reason === 'noCurrent') {
+    return { outcome: 'fail', probabilityOfConformity: 0, reason: 'noCurrent' };
+  }
   if (measure.value === null || measure.bound !== 'atLeast') return null;
   // The true value may lie anywhere above what was tested, so an upper limit stays open.
   if (limit.upper !== null) return open('guardBand');
@@ -110,11 +114,6 @@ function decideCompliance(
     return { outcome: 'pass', probabilityOfConformity: null, reason: measure.reason };
   }
   return open('rangeNotCovered');
-}
-
-/** A compliance voltage can fail for want of any current: that is worth saying beside the figure. */
-function reasonBehind(measure: Measure, analysis: SweepAnalysis): string | null {
-  return measure.name === 'complianceVoltage' ? analysis.compliance.reason : measure.reason;
 }
 
 function open(reason: string): Decision {

@@ -9,7 +9,8 @@ import {
   withSlope,
 } from './analysis.builder.js';
 import { analyseSweep } from '../sweep/analyse-sweep.js';
-import { aSweep, pointsOf, steps } from '../sweep/sweep.builder.js';
+import { aProduct, aSweep, pointsOf, steps } from '../sweep/sweep.builder.js';
+import { judgeResult } from './judge-result.js';
 
 describe('compliance voltage, limited whether or not anyone released a limit for it', () => {
   const exact = (value: number) =>
@@ -85,6 +86,19 @@ describe('compliance voltage, limited whether or not anyone released a limit for
     expect(verdict).toBe('fail');
     expect(failedMeasures).toEqual(['complianceVoltage']);
     expect(judgementOf(measures, 'complianceVoltage').reason).toBe('noCurrent');
+  });
+
+  it.each([
+    ['at the end of the range only', [8, 8, 8], 0],
+    ['beyond the range', [8.3, 8.4, 8.5], 0],
+    ['with resistors, so that no load voltage comes about', [0, 0, 0, 0], 1],
+  ])('fails an output without current tested %s', (_, loadVolts, complianceLowVolts) => {
+    const product = aProduct({ complianceLowVolts });
+    const analysis = analyseSweep(aSweep({ points: pointsOf(loadVolts, () => 0), product }));
+    const { verdict, failedMeasures } = judgeResult({ analysis, outcome: 'completed', limits: [], product });
+    expect(verdict).toBe('fail');
+    expect(failedMeasures).toEqual(['complianceVoltage']);
+    expect(analysis.flags).toContain('complianceShort');
   });
 });
 

@@ -12,7 +12,10 @@ import { differenceUncertainty, type SweepFindings } from './sweep-findings.js';
 export function complianceVoltage(findings: SweepFindings): Measure {
   const { finding, crossing } = findings.compliance;
   if (finding.complianceVolts === null) {
-    return absentMeasure('complianceVoltage', `notMeasured: ${finding.reason ?? 'no points'}`);
+    return absentMeasure(
+      'complianceVoltage',
+      finding.reason === 'fewPoints' ? 'notMeasured: fewPoints' : 'notMeasured',
+    );
   }
   if (finding.bound === 'atLeast')
     return boundMeasure('complianceVoltage', 'atLeast', finding.complianceVolts);

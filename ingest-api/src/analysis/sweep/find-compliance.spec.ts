@@ -82,6 +82,16 @@ describe('compliance', () => {
     expect(analysis.compliance).toMatchObject({ bound: 'atLeast', complianceVolts: 8 });
   });
 
+  it('is uncertain by the whole step where nothing can be interpolated', () => {
+    const measure = measureOf(
+      analyseSweep(
+        aSweep({ points: pointsOf(steps(0, 8, 9), (volts) => (volts > 0 ? 0 : 500e-6)), ...bench }),
+      ),
+      'complianceVoltage',
+    );
+    expect(measure).toMatchObject({ value: 1, expandedUncertainty: 1 });
+  });
+
   it('is uncertain by what the currents are, never by more than a step', () => {
     const fine = measureOf(analyseSweep(sweepOf(6.1)), 'complianceVoltage').expandedUncertainty!;
     expect(fine).toBeGreaterThan(0);

@@ -23,7 +23,7 @@ export interface ToleranceCrossing {
   volts: number;
   /** Distance between the last inside and the first outside point. */
   stepVolts: number;
-  /** How far the crossing moves when one of the two currents changes: V per A. */
+  /** How far the crossing moves when one of the two currents changes: V per A; ∞ when it can't be interpolated. */
   voltsPerAmp: number;
 }
 
@@ -35,6 +35,9 @@ export interface ToleranceCrossing {
  * current. The knee is the first outside point that is followed by another one or by the end. The compliance
  * voltage is where I/Î − 1 crosses −τ, interpolated linearly between the last inside and the first outside point;
  * with no knee it is *at least* the highest tested voltage, with a knee at the first point *at most* that.
+ *
+ * An output of which no point carries a tenth of the nominal current has the reason `noCurrent`, wherever it was
+ * tested.
  *
  * With fewer than 4 points in the lower half no knee is claimed. The absence of one is still proven when all
  * currents lie within τ of the largest.
@@ -51,11 +54,13 @@ export function findCompliance(points: readonly PreparedPoint[], product: Produc
     (point) => point.loadVolts >= product.complianceLowVolts - endTolerance(product),
   );
   const highest = tested.at(-1);
-  if (highest === undefined) return untold('notMeasured', product);
-  if (deliversNothing(tested, product)) {
-    const lowest = tested[0]!.loadVolts;
+  // A dead output on a resistor as load never reaches V_lo: all its points count then.
+  const asked = highest === undefined ? points : tested;
+  if (asked.length > 0 && deliversNothing(asked, product)) {
+    const lowest = asked[0]!.loadVolts;
     return finding({ complianceVolts: lowest, bound: 'atMost', reason: 'noCurrent' }, Infinity, product);
   }
+  if (highest === undefined) return untold('notMeasured', product);
   const seed = seedLine(tested, product);
   if (seed === null) {
     return withinToleranceOfLargest(tested, product)
@@ -135,7 +140,7 @@ function crossingBetween(
   return {
     volts: inside.loadVolts + share * stepVolts,
     stepVolts,
-    voltsPerAmp: lost > 0 && expected > 0 ? stepVolts / lost / expected : 0,
+    voltsPerAmp: lost > 0 && expected > 0 ? stepVolts / lost / expected : Infinity,
   };
 }
 

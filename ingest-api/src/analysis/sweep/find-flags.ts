@@ -1,4 +1,4 @@
-import type { AnalysisFlag, PreparedPoint, ProductSpec } from '../analysis.types.js';
+import type { AnalysisFlag, ComplianceFinding, PreparedPoint, ProductSpec } from '../analysis.types.js';
 import { promisedSpan } from './same-voltage.js';
 import type { SweepFindings } from './sweep-findings.js';
 
@@ -22,7 +22,7 @@ export function findFlags(evidence: FlagEvidence): AnalysisFlag[] {
   const { findings, points, steps } = evidence;
   const { impedance, curvature, compliance, repeated, fit, input } = findings;
   const raised: Record<AnalysisFlag, boolean> = {
-    complianceShort: isShort(compliance.finding.complianceVolts, compliance.finding.bound, input.product),
+    complianceShort: isShort(compliance.finding, input.product),
     curved: curvature?.curved ?? false,
     fewPoints: steps < FEW_STEPS,
     resolutionAssumed: evidence.resolutionAssumed,
@@ -36,7 +36,8 @@ export function findFlags(evidence: FlagEvidence): AnalysisFlag[] {
   return (Object.keys(raised) as AnalysisFlag[]).filter((flag) => raised[flag]);
 }
 
-function isShort(complianceVolts: number | null, bound: string, product: ProductSpec): boolean {
+function isShort({ complianceVolts, bound, reason }: ComplianceFinding, product: ProductSpec): boolean {
+  if (reason === 'noCurrent') return true;
   return complianceVolts !== null && bound !== 'atLeast' && complianceVolts < product.complianceHighVolts;
 }
 
