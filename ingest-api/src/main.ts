@@ -11,7 +11,7 @@ import {
 } from './users/first-administrator.js';
 
 /** A station that dribbles its body in is cut off after this long. */
-const slowestRequestMs = 30_000;
+const SLOWEST_REQUEST_MS = 30_000;
 
 async function serve(env: Env): Promise<void> {
   const app = await createApp(env);
@@ -19,7 +19,7 @@ async function serve(env: Env): Promise<void> {
   await refuseDemoAccounts(env);
   await app.get(FirstAdministrator, { strict: false }).createOnce();
   const server: Server = app.getHttpServer();
-  server.requestTimeout = slowestRequestMs;
+  server.requestTimeout = SLOWEST_REQUEST_MS;
   server.headersTimeout = 10_000;
   await app.listen(env.port, env.host);
   const address = server.address();

@@ -11,7 +11,7 @@ import type { CreateApiKeyDto } from './dto/create-api-key.dto.js';
 import { createKey, matchesSecret, splitKey } from './key-secret.js';
 import { ApiKey } from './models/api-key.model.js';
 
-const lastUseFlushMs = 30_000;
+const LAST_USE_FLUSH_MS = 30_000;
 
 /** Keys are few and asked for with every post: all of them are held in memory. */
 @Injectable()
@@ -135,7 +135,7 @@ export class ApiKeysService implements OnModuleInit, BeforeApplicationShutdown {
     return record;
   }
 
-  @Interval(lastUseFlushMs)
+  @Interval(LAST_USE_FLUSH_MS)
   async saveLastUses(): Promise<void> {
     if (this.unsavedUses.size === 0) return;
     const uses = [...this.unsavedUses];

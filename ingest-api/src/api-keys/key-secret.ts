@@ -1,7 +1,7 @@
 import { createHash, randomBytes, randomInt, timingSafeEqual } from 'node:crypto';
 
-const alphabet = 'abcdefghijkmnpqrstuvwxyz23456789';
-const keyForm = /^amk_([a-z0-9]{8})_([A-Za-z0-9_-]{43})$/;
+const PREFIX_ALPHABET = 'abcdefghijkmnpqrstuvwxyz23456789';
+const KEY_FORM = /^amk_([a-z0-9]{8})_([A-Za-z0-9_-]{43})$/;
 
 export interface NewKey {
   /** What the station sends; shown once. */
@@ -14,14 +14,14 @@ export const hashSecret = (secret: string): string => createHash('sha256').updat
 
 /** A key `amk_<prefix>_<secret>`: a public prefix of 8 characters and a random secret of 256 bits. */
 export function createKey(): NewKey {
-  const prefix = Array.from({ length: 8 }, () => alphabet[randomInt(alphabet.length)]).join('');
+  const prefix = Array.from({ length: 8 }, () => PREFIX_ALPHABET[randomInt(PREFIX_ALPHABET.length)]).join('');
   const secret = randomBytes(32).toString('base64url');
   return { key: `amk_${prefix}_${secret}`, prefix, secretHash: hashSecret(secret) };
 }
 
 /** Splits a key into prefix and secret; null when it isn't one. */
 export function splitKey(key: string): { prefix: string; secret: string } | null {
-  const match = keyForm.exec(key);
+  const match = KEY_FORM.exec(key);
   return match === null ? null : { prefix: match[1]!, secret: match[2]! };
 }
 

@@ -2,7 +2,7 @@ import { randomBytes } from 'node:crypto';
 import { mkdirSync, readFileSync, writeFileSync } from 'node:fs';
 import { join } from 'node:path';
 
-const leastCharacters = 43;
+const LEAST_CHARACTERS = 43;
 
 function readIfThere(file: string): string | null {
   try {
@@ -27,7 +27,7 @@ export function jwtSecret(dataDir: string): string {
     // `wx`: two processes that start together must not sign with different secrets.
     writeFileSync(file, `${secret}\n`, { flag: 'wx', mode: 0o600 });
   }
-  if (secret.length < leastCharacters) {
+  if (secret.length < LEAST_CHARACTERS) {
     throw new Error(`${file} is damaged: delete it and start again. Everybody then signs in anew.`);
   }
   return secret;

@@ -5,9 +5,9 @@ import type { AccessKind, RightDto } from './dto/right.dto.js';
 import { type Access, rights } from './rights.js';
 import { roles } from './roles.js';
 
-const globalPrefix = '/api/v1';
+const GLOBAL_PREFIX = '/api/v1';
 
-const swaggerOperation = 'swagger/apiOperation';
+const SWAGGER_OPERATION = 'swagger/apiOperation';
 
 function kindOf(access: Access): AccessKind {
   if (access.public) return 'public';
@@ -19,7 +19,7 @@ const joined = (...parts: string[]): string =>
   parts
     .map((part) => part.replace(/^\/|\/$/g, ''))
     .filter((part) => part !== '')
-    .reduce((path, part) => `${path}/${part}`, globalPrefix);
+    .reduce((path, part) => `${path}/${part}`, GLOBAL_PREFIX);
 
 /** The table of rights in words: each route's own summary stands beside who may use it. */
 @Injectable()
@@ -55,7 +55,7 @@ export class RightsService {
         const method = Reflect.getMetadata(METHOD_METADATA, handler) as RequestMethod | undefined;
         if (method === undefined) continue;
         const path = Reflect.getMetadata(PATH_METADATA, handler) as string;
-        const operation = Reflect.getMetadata(swaggerOperation, handler) as { summary?: string } | undefined;
+        const operation = Reflect.getMetadata(SWAGGER_OPERATION, handler) as { summary?: string } | undefined;
         summaries.set(`${RequestMethod[method]} ${joined(controllerPath, path)}`, operation?.summary ?? '');
       }
     }

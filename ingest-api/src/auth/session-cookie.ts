@@ -4,7 +4,7 @@ import type { Request, Response } from 'express';
 import { CLOCK, type Clock, ENV } from '../config/config.module.js';
 import type { Env } from '../config/env.js';
 
-export const sessionCookieName = 'ampkeep_session';
+export const SESSION_COOKIE = 'ampkeep_session';
 
 interface SessionClaims {
   jti?: unknown;
@@ -25,19 +25,19 @@ export class SessionCookie {
       iat: Math.floor(this.clock() / 1000),
       exp: Math.floor(session.expiresAt / 1000),
     });
-    response.cookie(sessionCookieName, token, {
+    response.cookie(SESSION_COOKIE, token, {
       ...this.attributes(),
       maxAge: session.expiresAt - this.clock(),
     });
   }
 
   clear(response: Response): void {
-    response.clearCookie(sessionCookieName, this.attributes());
+    response.clearCookie(SESSION_COOKIE, this.attributes());
   }
 
   /** The session's id, or null when the request carries no token or one that we did not sign. */
   async read(request: Request): Promise<string | null> {
-    const token = (request.cookies as Record<string, unknown> | undefined)?.[sessionCookieName];
+    const token = (request.cookies as Record<string, unknown> | undefined)?.[SESSION_COOKIE];
     if (typeof token !== 'string') return null;
     try {
       const claims = await this.jwt.verifyAsync<SessionClaims>(token, {

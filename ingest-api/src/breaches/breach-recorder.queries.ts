@@ -23,7 +23,7 @@ export interface NewBreachEvent {
   text: string;
 }
 
-const returned = 'cause_key AS causeKey, breach_id AS breachId, state, mailed_at AS mailedAt';
+const RETURNED_COLUMNS = 'cause_key AS causeKey, breach_id AS breachId, state, mailed_at AS mailedAt';
 
 const byCauseKey = (rows: readonly UnclosedBreach[]): Map<string, UnclosedBreach> =>
   new Map(rows.map((row) => [row.causeKey, row]));
@@ -32,7 +32,7 @@ export async function findUnclosed(
   transaction: Transaction,
   causeKeys: readonly string[],
 ): Promise<Map<string, UnclosedBreach>> {
-  const sql = `SELECT ${returned} FROM breaches
+  const sql = `SELECT ${RETURNED_COLUMNS} FROM breaches
     WHERE state <> 'closed' AND cause_key ${inList('?')}`;
   return byCauseKey(await selectRows<UnclosedBreach>(transaction, sql, JSON.stringify(causeKeys)));
 }
@@ -45,7 +45,7 @@ export async function openBreaches(
   const sql = `INSERT INTO breaches (cause_key, stage_id, measure, state, opened_at, last_event_at, event_count)
     SELECT causeKey, stageId, measure, 'open', openedAt, openedAt, 0
     FROM ${recordTable('?', ['causeKey', 'stageId', 'measure', 'openedAt'])} WHERE true
-    RETURNING ${returned}`;
+    RETURNING ${RETURNED_COLUMNS}`;
   return byCauseKey(await selectRows<UnclosedBreach>(transaction, sql, JSON.stringify(breaches)));
 }
 

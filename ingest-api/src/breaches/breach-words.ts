@@ -7,7 +7,7 @@ import type { BreachMeasure } from './models/breach.model.js';
 /** The enough-for-a-subject precision of a figure whose uncertainty isn't told with it. */
 const SHORT_DIGITS = 4;
 
-const stoppedText = 'The station stopped the test on a fail.';
+const STOPPED_TEXT = 'The station stopped the test on a fail.';
 
 /** Names a breach in lists, e.g. `Output impedance out of limits: FH-R500-W at final`. */
 export function breachTitle(measure: BreachMeasure, partNumber: string, stage: string): string {
@@ -18,7 +18,7 @@ export function breachTitle(measure: BreachMeasure, partNumber: string, stage: s
 
 /** The judging of the broken measure as one sentence. */
 export function breachEventText(judgement: MeasureJudgement | null): string {
-  return judgement === null ? stoppedText : describeJudgement(judgement);
+  return judgement === null ? STOPPED_TEXT : describeJudgement(judgement);
 }
 
 /**

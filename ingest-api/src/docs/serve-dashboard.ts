@@ -6,7 +6,7 @@ import express, { type NextFunction, type Request, type Response } from 'express
 /** The built dashboard, beside this package; absent while developing, when Vite serves it. */
 const dashboardFolder = join(__dirname, '../../../dashboard/dist');
 
-const yearSeconds = 31_536_000;
+const YEAR_SECONDS = 31_536_000;
 
 /** Serves the dashboard: its hashed files for ever, and its page for every address that is no file nor API. */
 export function serveDashboard(app: NestExpressApplication, folder = dashboardFolder): void {
@@ -16,7 +16,7 @@ export function serveDashboard(app: NestExpressApplication, folder = dashboardFo
     '/assets',
     express.static(join(folder, 'assets'), {
       immutable: true,
-      maxAge: yearSeconds * 1000,
+      maxAge: YEAR_SECONDS * 1000,
       fallthrough: false,
     }),
   );

@@ -11,9 +11,9 @@ import { Writer } from '../database/writer.js';
 import { LiveService } from '../live/live.service.js';
 
 /** A longer body is kept cut off: enough to see what is wrong, too little to fill the disk. */
-const keptBytes = 256_000;
+const KEPT_BYTES = 256_000;
 /** What a row takes besides its body and its reasons, roughly. */
-const rowBytes = 500;
+const ROW_BYTES = 500;
 
 interface KeptPost {
   bytes: Buffer;
@@ -38,9 +38,9 @@ export class RefusedPostsService {
 
   /** The same body refused again only counts up. The oldest make room when the quota is full. */
   async keep(post: KeptPost): Promise<void> {
-    const body = gzipSync(post.bytes.subarray(0, keptBytes));
+    const body = gzipSync(post.bytes.subarray(0, KEPT_BYTES));
     const errors = JSON.stringify(post.error.errors);
-    const storedBytes = rowBytes + body.length + Buffer.byteLength(errors);
+    const storedBytes = ROW_BYTES + body.length + Buffer.byteLength(errors);
     await this.writer.run(async (transaction) => {
       await this.insert(transaction, post, { body, errors, storedBytes });
       this.storedBytes = (this.storedBytes ?? (await totalBytes(transaction))) + storedBytes;
@@ -80,7 +80,7 @@ export class RefusedPostsService {
       body,
       bytes.length,
       storedBytes,
-      bytes.length > keptBytes ? 1 : 0,
+      bytes.length > KEPT_BYTES ? 1 : 0,
       now,
       now,
     );

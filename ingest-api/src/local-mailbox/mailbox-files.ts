@@ -19,8 +19,8 @@ export interface KeptMail {
 /** Beyond this the oldest make room. */
 const MOST_KEPT = 500;
 
-const idPattern = /^(\d{13})-[0-9a-f]{12}$/;
-const fileEnding = '.eml';
+const ID_PATTERN = /^(\d{13})-[0-9a-f]{12}$/;
+const FILE_ENDING = '.eml';
 
 /** Mails as files in `mailbox/` of the data folder, as they came; a small index of them in memory. */
 @Injectable()
@@ -39,9 +39,9 @@ export class MailboxFiles {
   async open(): Promise<void> {
     await mkdir(this.folder, { recursive: true, mode: 0o700 });
     const mailIds = (await readdir(this.folder))
-      .filter((name) => name.endsWith(fileEnding))
-      .map((name) => name.slice(0, -fileEnding.length))
-      .filter((name) => idPattern.test(name))
+      .filter((name) => name.endsWith(FILE_ENDING))
+      .map((name) => name.slice(0, -FILE_ENDING.length))
+      .filter((name) => ID_PATTERN.test(name))
       .sort();
     for (const mailId of mailIds)
       this.index.set(mailId, kept(mailId, await parse(await readFile(this.path(mailId)))));
@@ -73,7 +73,7 @@ export class MailboxFiles {
   }
 
   private path(mailId: string): string {
-    return join(this.folder, `${mailId}${fileEnding}`);
+    return join(this.folder, `${mailId}${FILE_ENDING}`);
   }
 
   private async makeRoom(): Promise<void> {
@@ -94,7 +94,7 @@ function kept(mailId: string, mail: ParsedMail): KeptMail {
     to: addresses(mail.to),
     from: mail.from?.text ?? '',
     subject: mail.subject ?? '',
-    receivedAt: Number(idPattern.exec(mailId)![1]),
+    receivedAt: Number(ID_PATTERN.exec(mailId)![1]),
     messageId: mail.messageId ?? '',
   };
 }

@@ -64,11 +64,11 @@ export function neighbours(
 }
 
 /** Extra-low voltage ends at 60 V d.c. (common practice; lower in wet places). */
-const cautionVolts = 60;
+const CAUTION_VOLTS = 60;
 
 /** The caution that stands on product, plan and unit pages, or null. */
 export function cautionFor({ supplyVolts, complianceHighVolts }: ProductSpec): string | null {
-  if (Math.max(Math.abs(supplyVolts), Math.abs(complianceHighVolts)) <= cautionVolts) return null;
+  if (Math.max(Math.abs(supplyVolts), Math.abs(complianceHighVolts)) <= CAUTION_VOLTS) return null;
   return (
     'Above 60 V d.c.: work on this product is for qualified persons only, by the rules of your site, IEC 61010-1 and local codes. ' +
     'A verdict is no safety approval.'

@@ -48,10 +48,10 @@ export interface Evaluation {
  * Instruments signal overload by a figure far beyond any range; 9.9e37 is what SCPI prescribes
  * (from memory). Such a reading is an overload, not a current.
  */
-const overloadCode = 9e36;
+const OVERLOAD_CODE = 9e36;
 
 /** No meter resolves less; what lies below is the dust of somebody's arithmetic, and would underflow in ours. */
-const smallestReading = 1e-30;
+const SMALLEST_READING = 1e-30;
 
 /** Computes and judges a valid post: measures, verdict and flags. Pure. */
 export function evaluatePost(post: PostedResult, context: EvaluationContext): Evaluation {
@@ -103,11 +103,11 @@ export function limitSiemensOf(limits: readonly Limit[], referenceAmps: number |
 function toSweepPoint(point: PostedPoint): SweepPoint {
   const loadVolts = withoutDust(point.loadVolts);
   const outputAmps = withoutDust(point.outputAmps);
-  const beyond = Math.abs(outputAmps) >= overloadCode || Math.abs(loadVolts) >= overloadCode;
+  const beyond = Math.abs(outputAmps) >= OVERLOAD_CODE || Math.abs(loadVolts) >= OVERLOAD_CODE;
   return { ...point, loadVolts, outputAmps, ...(beyond ? { overload: true } : {}) };
 }
 
-const withoutDust = (reading: number): number => (Math.abs(reading) < smallestReading ? 0 : reading);
+const withoutDust = (reading: number): number => (Math.abs(reading) < SMALLEST_READING ? 0 : reading);
 
 function mergeAmmeter(
   posted: PostedAmmeter | undefined,

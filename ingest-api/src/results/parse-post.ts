@@ -1,14 +1,14 @@
 import { getNodePath, parseTree, visit, type JSONVisitor } from 'jsonc-parser';
 import { type ErrorPlace, MalformedError } from '../common/errors.js';
 
-const deepestNesting = 12;
-const mostErrors = 50;
-const longestName = 64;
+const DEEPEST_NESTING = 12;
+const MOST_ERRORS = 50;
+const LONGEST_NAME = 64;
 const utf8 = new TextDecoder('utf-8', { fatal: true });
 
 /** No name of the contract is longer; a stranger's megabyte shall not come back in every error. */
 export const shortened = (name: string): string =>
-  name.length <= longestName ? name : `${name.slice(0, longestName)}…`;
+  name.length <= LONGEST_NAME ? name : `${name.slice(0, LONGEST_NAME)}…`;
 
 export const pointerOf = (path: readonly (string | number)[]): string =>
   path.map((part) => `/${shortened(String(part)).replaceAll('~', '~0').replaceAll('/', '~1')}`).join('');
@@ -74,14 +74,14 @@ function hiddenFaults(text: string): ErrorPlace[] {
   let depth = 0;
   const enter = (): void => {
     depth += 1;
-    if (depth > deepestNesting)
-      throw new MalformedError(`The JSON nests deeper than ${deepestNesting} levels.`);
+    if (depth > DEEPEST_NESTING)
+      throw new MalformedError(`The JSON nests deeper than ${DEEPEST_NESTING} levels.`);
   };
   const leave = (): void => {
     depth -= 1;
   };
   const report = (path: readonly (string | number)[], code: string, detail: string): void => {
-    if (errors.length < mostErrors) errors.push({ pointer: pointerOf(path), code, detail });
+    if (errors.length < MOST_ERRORS) errors.push({ pointer: pointerOf(path), code, detail });
   };
   const halfPair = 'This text holds half a surrogate pair.';
   const visitor: JSONVisitor = {

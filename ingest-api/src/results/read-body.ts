@@ -5,7 +5,7 @@ import getRawBody from 'raw-body';
 import { AmpkeepError, MalformedError } from '../common/errors.js';
 
 /** 500 points with every property come to about 120 kB. */
-export const largestPostBytes = 1_000_000;
+export const LARGEST_POST_BYTES = 1_000_000;
 const inflate = promisify(gunzip);
 
 /** The body arrived whole, but can't be unpacked. */
@@ -17,7 +17,7 @@ export class NotUnpackableError extends MalformedError {
 
 class TooLargeError extends AmpkeepError {
   constructor() {
-    super(413, 'too_large', 'Too large', `A post may have up to ${largestPostBytes} bytes, unpacked.`);
+    super(413, 'too_large', 'Too large', `A post may have up to ${LARGEST_POST_BYTES} bytes, unpacked.`);
   }
 }
 
@@ -48,7 +48,10 @@ export async function readJsonBytes(request: Request): Promise<Buffer> {
 
 async function readRaw(request: Request): Promise<Buffer> {
   try {
-    return await getRawBody(request, { limit: largestPostBytes, length: request.headers['content-length'] });
+    return await getRawBody(request, {
+      limit: LARGEST_POST_BYTES,
+      length: request.headers['content-length'],
+    });
   } catch (error) {
     if ((error as { type?: string }).type === 'entity.too.large') throw new TooLargeError();
     throw new MalformedError('The body broke off before its announced length.');
@@ -57,7 +60,7 @@ async function readRaw(request: Request): Promise<Buffer> {
 
 async function unpack(bytes: Buffer): Promise<Buffer> {
   try {
-    return await inflate(bytes, { maxOutputLength: largestPostBytes });
+    return await inflate(bytes, { maxOutputLength: LARGEST_POST_BYTES });
   } catch (error) {
     if ((error as { code?: string }).code === 'ERR_BUFFER_TOO_LARGE') throw new TooLargeError();
     throw new NotUnpackableError(bytes);

@@ -25,7 +25,7 @@ import { findFaults } from './validate-post.js';
 import { findWarnings } from './warnings.js';
 
 /** How far ahead of the server a station's clock may be. */
-const allowedLeadMs = 5 * 60_000;
+const ALLOWED_LEAD_MS = 5 * 60_000;
 const keptStatuses = new Set([400, 409, 422]);
 
 export interface RecordOptions {
@@ -121,7 +121,7 @@ export class ResultsService {
         });
       }
     }
-    if (Date.parse(post.startedAt) > this.now() + allowedLeadMs) {
+    if (Date.parse(post.startedAt) > this.now() + ALLOWED_LEAD_MS) {
       faults.push({
         pointer: '/startedAt',
         code: 'inFuture',

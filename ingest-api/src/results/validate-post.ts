@@ -10,16 +10,16 @@ export { schema as resultSchema };
 const check = createAjv({ verbose: true }).compile<PostedResult>(schema);
 /** For what is far too large to be a result: the first fault will do, all of them would take seconds. */
 const checkFirst = createAjv({ verbose: true, allErrors: false }).compile<PostedResult>(schema);
-const mostErrors = 50;
+const MOST_ERRORS = 50;
 /** 500 points with every property come to 5,000. */
-const mostValues = 10_000;
+const MOST_VALUES = 10_000;
 
 /** Gives the places where a value breaks the result schema; none means that it is a PostedResult. */
 export function findFaults(value: unknown): ErrorPlace[] {
-  const validate = countValues(value) > mostValues ? checkFirst : check;
+  const validate = countValues(value) > MOST_VALUES ? checkFirst : check;
   if (validate(value)) return [];
   const faults = (validate.errors ?? []).filter(isWorthTelling);
-  return faults.slice(0, mostErrors).map(toPlace);
+  return faults.slice(0, MOST_ERRORS).map(toPlace);
 }
 
 /** `if` and what is wrong with a name say the same as the error that goes with them, in worse words. */
@@ -59,7 +59,7 @@ function toPlace(error: ErrorObject): ErrorPlace {
     return {
       pointer: instancePath + pointerOf([found]),
       code: 'propertyNames',
-      detail: `"${shortened(found)}" can't be a name: ${namesAre}`,
+      detail: `"${shortened(found)}" can't be a name: ${NAMES_ARE}`,
     };
   }
   if (keyword === 'format' || keyword === 'pattern') {
@@ -68,7 +68,7 @@ function toPlace(error: ErrorObject): ErrorPlace {
   return { pointer: instancePath, code: keyword, detail: `This ${error.message ?? 'is not valid'}.` };
 }
 
-const namesAre = 'up to 64 characters, no control characters, no space at either end, not "." or "..".';
+const NAMES_ARE = 'up to 64 characters, no control characters, no space at either end, not "." or "..".';
 
 /** What a text has to look like, in words; regular expressions are nobody's help. */
 function formDetail({ schemaPath, params }: ErrorObject): string {
@@ -76,7 +76,7 @@ function formDetail({ schemaPath, params }: ErrorObject): string {
   if (format === 'date-time') return 'Must be an RFC 3339 time with zone, such as 2026-11-30T08:15:30.120Z.';
   if (format === 'uuid' || schemaPath.includes('/resultId/'))
     return 'Must be a UUID, such as 0193f3a2-6f0e-7c52-9a3e-5b1f4c0d2e11.';
-  return `Must be a name: ${namesAre}`;
+  return `Must be a name: ${NAMES_ARE}`;
 }
 
 /** Ends the sentence, for "loadVolt" with `did you mean "loadVolts"?`; only when it is near enough to be a slip. */

@@ -12,7 +12,7 @@ export interface WarningFacts {
   ceilingOhms: number | null;
 }
 
-const hourMs = 3_600_000;
+const HOUR_MS = 3_600_000;
 
 /** What the station should see to. Warnings change no verdict. */
 export function findWarnings(
@@ -52,7 +52,7 @@ function goldenText(
 ): string | null {
   const hours = Math.min(...product.goldenCheckHours.values());
   if (!Number.isFinite(hours)) return null;
-  if (lastGoldenAt !== null && receivedAt - lastGoldenAt <= hours * hourMs) return null;
+  if (lastGoldenAt !== null && receivedAt - lastGoldenAt <= hours * HOUR_MS) return null;
   return `Measure a golden unit of ${product.partNumber}: this station owes one every ${hours} h.`;
 }
 

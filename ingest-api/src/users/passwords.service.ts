@@ -11,20 +11,20 @@ import { BcryptThread } from './bcrypt-thread.js';
  */
 const bcryptCost = { serve: 12, demo: 4 } as const;
 
-export const leastPasswordCharacters = 12;
+export const LEAST_PASSWORD_CHARACTERS = 12;
 
-const queueLimit = 40;
+const QUEUE_LIMIT = 40;
 
 /**
  * What keeps a password from being taken; null when it may be.
  * bcrypt reads no more than 72 bytes, so a longer one would be weaker than it looks.
  */
 export function passwordFault(password: string, pointer: string): ErrorPlace | null {
-  if ([...password].length < leastPasswordCharacters) {
+  if ([...password].length < LEAST_PASSWORD_CHARACTERS) {
     return {
       pointer,
       code: 'password_short',
-      detail: `Must have at least ${leastPasswordCharacters} characters.`,
+      detail: `Must have at least ${LEAST_PASSWORD_CHARACTERS} characters.`,
     };
   }
   if (truncates(password)) {
@@ -54,7 +54,7 @@ export class PasswordsService implements OnApplicationShutdown {
    * @throws TooManyRequestsError when too many wait for their check already.
    */
   async matches(password: string, hash: string | null): Promise<boolean> {
-    if (this.thread.queueLength >= queueLimit) {
+    if (this.thread.queueLength >= QUEUE_LIMIT) {
       throw new TooManyRequestsError('Too many people are signing in at this moment. Try again soon.', 10);
     }
     this.nobodysHash ??= this.hash('a password that no account has');

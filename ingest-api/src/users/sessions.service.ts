@@ -7,12 +7,12 @@ import type { Person } from '../auth/principals.js';
 import { CLOCK, type Clock } from '../config/config.module.js';
 import { Session } from './models/session.model.js';
 
-const lifetimeMs = 12 * 3600 * 1000;
+const LIFETIME_MS = 12 * 3600 * 1000;
 
 /** Another process on the same database (a command) may change accounts; its changes act within this time. */
-const longestUnreadMs = 10_000;
+const LONGEST_UNREAD_MS = 10_000;
 
-const cacheLimit = 2000;
+const CACHE_LIMIT = 2000;
 
 interface Remembered {
   person: Person;
@@ -47,7 +47,7 @@ export class SessionsService {
     await Session.destroy({ where: { expiresAt: { [Op.lte]: now } }, transaction });
     const sessionId = randomBytes(32).toString('base64url');
     return Session.create(
-      { sessionId, userId, createdAt: now, expiresAt: now + lifetimeMs, endedAt: null },
+      { sessionId, userId, createdAt: now, expiresAt: now + LIFETIME_MS, endedAt: null },
       { transaction },
     );
   }
@@ -77,7 +77,7 @@ export class SessionsService {
   async find(sessionId: string): Promise<Person | null> {
     const now = this.clock();
     const known = this.remembered.get(sessionId);
-    if (known && known.expiresAt > now && now - known.readAt < longestUnreadMs) return known.person;
+    if (known && known.expiresAt > now && now - known.readAt < LONGEST_UNREAD_MS) return known.person;
     const { generation } = this;
     const [row] = await this.sequelize.query<Person & { expiresAt: number }>(findOpenSession, {
       replacements: [sessionId, now],
@@ -92,7 +92,7 @@ export class SessionsService {
 
   private remember(entry: Remembered): void {
     const oldest = this.remembered.keys().next();
-    if (this.remembered.size >= cacheLimit && !oldest.done) this.remembered.delete(oldest.value);
+    if (this.remembered.size >= CACHE_LIMIT && !oldest.done) this.remembered.delete(oldest.value);
     this.remembered.set(entry.person.sessionId, entry);
   }
 }

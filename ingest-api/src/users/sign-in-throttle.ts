@@ -8,10 +8,10 @@ interface Tally {
   pausedUntil: number;
 }
 
-const firstPauseMs = 15_000;
-const longestPauseMs = 15 * 60_000;
-const forgottenAfterMs = 60 * 60_000;
-const talliesKept = 10_000;
+const FIRST_PAUSE_MS = 15_000;
+const LONGEST_PAUSE_MS = 15 * 60_000;
+const FORGOTTEN_AFTER_MS = 60 * 60_000;
+const TALLIES_KEPT = 10_000;
 
 /** How many failures are free of a pause. A whole hall may share one network address. */
 const freeFailures = { account: 5, address: 20 } as const;
@@ -57,14 +57,14 @@ export class SignInThrottle {
   private tallyOf(kind: Kind, name: string): Tally {
     const tally = this.tallies.get(`${kind} ${name}`);
     const fresh = { failures: 0, lastAt: this.clock(), pausedUntil: 0 };
-    return tally && this.clock() - tally.lastAt < forgottenAfterMs ? tally : fresh;
+    return tally && this.clock() - tally.lastAt < FORGOTTEN_AFTER_MS ? tally : fresh;
   }
 
   private countFailure(kind: Kind, name: string): void {
     const now = this.clock();
     const failures = this.tallyOf(kind, name).failures + 1;
     const beyond = failures - freeFailures[kind];
-    const pauseMs = beyond < 0 ? 0 : Math.min(firstPauseMs * 2 ** beyond, longestPauseMs);
+    const pauseMs = beyond < 0 ? 0 : Math.min(FIRST_PAUSE_MS * 2 ** beyond, LONGEST_PAUSE_MS);
     this.keep(`${kind} ${name}`, { failures, lastAt: now, pausedUntil: now + pauseMs });
   }
 
@@ -80,6 +80,6 @@ export class SignInThrottle {
     this.tallies.delete(key);
     this.tallies.set(key, tally);
     const oldest = this.tallies.keys().next();
-    if (this.tallies.size > talliesKept && !oldest.done) this.tallies.delete(oldest.value);
+    if (this.tallies.size > TALLIES_KEPT && !oldest.done) this.tallies.delete(oldest.value);
   }
 }

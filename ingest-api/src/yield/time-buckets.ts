@@ -8,7 +8,7 @@ export interface TimeBucket {
   endAt: number;
 }
 
-const mostBuckets = 2000;
+const MOST_BUCKETS = 2000;
 
 /**
  * The steps from the beginning of one site day to the end of another. Days begin at the site's midnight, so a
@@ -24,9 +24,9 @@ export function timeBuckets(from: string, to: string, by: BucketKind, timeZone: 
   while (at < end) {
     const next = DateTime.min(stepAfter(at, by), end);
     buckets.push({ startAt: at.toMillis(), endAt: next.toMillis() });
-    if (buckets.length > mostBuckets) {
+    if (buckets.length > MOST_BUCKETS) {
       throw new InvalidError([
-        { pointer: '/by', code: 'range', detail: `More than ${mostBuckets} steps; take wider ones.` },
+        { pointer: '/by', code: 'range', detail: `More than ${MOST_BUCKETS} steps; take wider ones.` },
       ]);
     }
     at = next;

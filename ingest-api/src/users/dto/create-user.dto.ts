@@ -1,11 +1,11 @@
 import { ApiProperty } from '@nestjs/swagger';
 import { IsIn, IsString, Length, Matches, MaxLength } from 'class-validator';
 import { type Role, roles } from '../../auth/roles.js';
-import { emailPattern } from '../email-address.js';
+import { EMAIL_PATTERN } from '../email-address.js';
 
 export class CreateUserDto {
   /** @example "tomasz.reed@fernhollow.example" */
-  @Matches(emailPattern, { message: 'email must be a mail address' })
+  @Matches(EMAIL_PATTERN, { message: 'email must be a mail address' })
   email!: string;
 
   /** @example "Tomasz Reed" */

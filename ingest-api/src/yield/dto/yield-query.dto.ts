@@ -6,7 +6,7 @@ export type BucketKind = (typeof bucketKinds)[number];
 export const splitKinds = ['product', 'stage', 'station', 'fixture', 'lot', 'programVersion'] as const;
 export type SplitKind = (typeof splitKinds)[number];
 
-const day = /^\d{4}-\d{2}-\d{2}$/;
+const DAY_FORM = /^\d{4}-\d{2}-\d{2}$/;
 
 /** Which first attempts are asked for; every attribute is that of the first attempt. */
 export class YieldQueryDto {
@@ -14,14 +14,14 @@ export class YieldQueryDto {
    * First site day.
    * @example "2026-11-01"
    */
-  @Matches(day, { message: 'from must be a day, YYYY-MM-DD' })
+  @Matches(DAY_FORM, { message: 'from must be a day, YYYY-MM-DD' })
   from!: string;
 
   /**
    * Last site day, itself included.
    * @example "2026-11-30"
    */
-  @Matches(day, { message: 'to must be a day, YYYY-MM-DD' })
+  @Matches(DAY_FORM, { message: 'to must be a day, YYYY-MM-DD' })
   to!: string;
 
   /** Width of a step of the trend. */
