@@ -1,3 +1,4 @@
+import type { PostedResult } from '../src/results/result.types.js';
 import { connect, type AddressInfo } from 'node:net';
 import { gzipSync } from 'node:zlib';
 import type TestAgent from 'supertest/lib/agent.js';
@@ -218,7 +219,7 @@ describe('a post that cannot be taken', () => {
       ],
       ['null for what was not measured', { ambientCelsius: null as never }, '/ambientCelsius', /number/],
     ])('for %s', async (_, overrides, pointer, detail) => {
-      const places = await placesOf(aResult(overrides));
+      const places = await placesOf(aResult(overrides as Partial<PostedResult>));
       expect(places).toEqual(expect.objectContaining({ [pointer]: expect.stringMatching(detail) }));
       expect(Object.keys(places).every((place) => place.startsWith(pointer))).toBe(true);
     });
