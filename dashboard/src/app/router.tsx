@@ -4,6 +4,7 @@ import { RouteError } from '@/components/errors/route-error';
 import { connectRoutes } from './connect-routes';
 import { decideRoutes } from './decide-routes';
 import { SignedInRoute } from './routes/signed-in';
+import { settingsRoutes } from './settings-routes';
 
 /** Nothing until the first page's chunk is there: it comes within a blink, and a flash of words would only distract. */
 const beforeFirstPage = { HydrateFallback: () => null };
@@ -33,6 +34,7 @@ export const routes: RouteObject[] = [
           },
           ...decideRoutes,
           ...connectRoutes,
+          ...settingsRoutes,
           { path: '*', Component: NotFound },
         ],
       },

@@ -30,6 +30,7 @@ export const navigation: NavigationGroup[] = [
       { label: 'Stations', to: paths.stations() },
       { label: 'Intake', to: paths.intake() },
       { label: 'Docs', to: paths.connect() },
+      { label: 'Settings', to: paths.settings() },
     ],
   },
 ];

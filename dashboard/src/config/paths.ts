@@ -17,6 +17,10 @@ export const paths = {
   refusedPost: (intakeId: string) => `/intake/refused/${encodeURIComponent(intakeId)}`,
   connect: () => '/connect',
   settings: () => '/settings',
+  accounts: () => '/settings/accounts',
+  rights: () => '/settings/rights',
+  audit: () => '/settings/audit',
+  proof: () => '/settings/proof',
   mailbox: (query: Record<string, string> = {}) => withQuery('/mailbox', query),
 };
 
