@@ -24,6 +24,11 @@ export async function everyPage(page: Page): Promise<string[]> {
     paths.breach(closed.breachId),
     paths.intake(),
     paths.refusedPost(refused.intakeId),
+    paths.connect(),
+    paths.settings(),
+    paths.accounts(),
+    paths.rights(),
+    paths.audit(),
     '/no-such-page',
   ];
 }
