@@ -6,7 +6,7 @@ import { PageQueryDto } from '../common/page-query.dto.js';
 import { AuditService } from './audit.service.js';
 import { AuditPageDto, toAuditEntryDto } from './dto/audit-page.dto.js';
 
-@ApiTags('Accounts')
+@ApiTags('accounts')
 @Controller('audit')
 export class AuditController {
   constructor(private readonly audit: AuditService) {}

@@ -4,14 +4,14 @@ import { ApiProblems } from '../common/api-problems.decorator.js';
 import { RightDto } from './dto/right.dto.js';
 import { RightsService } from './rights.service.js';
 
-@ApiTags('Accounts')
+@ApiTags('accounts')
 @Controller('rights')
 export class RightsController {
   constructor(private readonly rights: RightsService) {}
 
   @Get()
   @ApiOperation({ summary: 'Which role may do what' })
-  @ApiProblems(401)
+  @ApiProblems()
   list(): RightDto[] {
     return this.rights.list();
   }

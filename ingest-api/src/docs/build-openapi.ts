@@ -1,5 +1,6 @@
 import type { INestApplication } from '@nestjs/common';
 import { DocumentBuilder, type OpenAPIObject, SwaggerModule } from '@nestjs/swagger';
+import { SESSION_COOKIE } from '../auth/session-cookie.js';
 import { ampkeepVersion } from '../config/version.js';
 import { resultSchema } from '../results/validate-post.js';
 import { withNullUnions } from './openapi-nullables.js';
@@ -12,9 +13,25 @@ The schema of a post is at [/docs/result.schema.json](/docs/result.schema.json).
 
 Ampkeep judges results. It is no safety function, and a verdict is no calibration certificate.`;
 
+/** The groups of the API docs, in their order. Every operation belongs to one. */
+const groups: Readonly<Record<string, string>> = {
+  results: 'Posting results, and reading them back',
+  'for stations': 'What a station asks before it tests, and its sign of life',
+  line: 'The line as it is today, its yields, and changes as they happen',
+  units: 'Units with their history',
+  breaches: 'What broke a rule: acknowledge it, close it with cause and action',
+  products: 'Products with their stages, test plans and limits in force',
+  stations: 'Stations, their instruments and their API keys',
+  intake: 'Everything that came in, accepted or refused',
+  mailbox: "The demo's mails",
+  accounts: 'Signing in, accounts, roles and the audit trail',
+  proof: 'Published figures, recomputed by this installation',
+  site: 'Name and health of this installation',
+};
+
 /** The OpenAPI 3.1 document, made from the code alone. */
 export function buildOpenApi(app: INestApplication): OpenAPIObject {
-  const config = new DocumentBuilder()
+  const builder = new DocumentBuilder()
     .setTitle('Ampkeep')
     .setDescription(description)
     .setVersion(ampkeepVersion)
@@ -30,11 +47,11 @@ export function buildOpenApi(app: INestApplication): OpenAPIObject {
     .addSecurity('session', {
       type: 'apiKey',
       in: 'cookie',
-      name: 'ampkeep_session',
+      name: SESSION_COOKIE,
       description: "A person's session, set by signing in",
-    })
-    .build();
-  const document = SwaggerModule.createDocument(app, config, {
+    });
+  for (const [name, purpose] of Object.entries(groups)) builder.addTag(name, purpose);
+  const document = SwaggerModule.createDocument(app, builder.build(), {
     operationIdFactory: (controller, method) => `${controller.replace(/Controller$/, '')}_${method}`,
   });
   const united = withNullUnions(document) as OpenAPIObject;

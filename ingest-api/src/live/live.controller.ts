@@ -9,7 +9,7 @@ import { LiveEventDto } from './dto/live-event.dto.js';
 import { liveStream } from './live-stream.js';
 import { LiveService } from './live.service.js';
 
-@ApiTags('live')
+@ApiTags('line')
 @Controller('live')
 export class LiveController {
   constructor(

@@ -4,7 +4,7 @@ import { ApiProblems } from '../common/api-problems.decorator.js';
 import { ProofDto } from './dto/proof.dto.js';
 import { ProofService } from './proof.service.js';
 
-@ApiTags('site')
+@ApiTags('proof')
 @Controller('proof')
 export class ProofController {
   constructor(private readonly service: ProofService) {}

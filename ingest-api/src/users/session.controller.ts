@@ -11,7 +11,7 @@ import { SignInDto } from './dto/sign-in.dto.js';
 import { toUserDto } from './dto/user.dto.js';
 import { SignInService } from './sign-in.service.js';
 
-@ApiTags('Accounts')
+@ApiTags('accounts')
 @Controller('session')
 export class SessionController {
   constructor(
@@ -25,7 +25,7 @@ export class SessionController {
     summary: 'Sign in',
     description: 'Sets the cookie `ampkeep_session` for 12 hours. Repeated failures bring growing pauses.',
   })
-  @ApiProblems(400, 401, 403, 422, 429)
+  @ApiProblems(400, 422)
   async signIn(
     @Body() credentials: SignInDto,
     @Ip() address: string,
@@ -38,7 +38,7 @@ export class SessionController {
 
   @Get()
   @ApiOperation({ summary: 'Who is signed in' })
-  @ApiProblems(401)
+  @ApiProblems()
   async current(@CurrentPerson() person: Person): Promise<SessionDto> {
     return { user: toUserDto(await this.signIns.account(person)) };
   }
@@ -47,7 +47,7 @@ export class SessionController {
   @HttpCode(204)
   @ApiOperation({ summary: 'Sign out' })
   @ApiNoContentResponse({ description: 'Signed out' })
-  @ApiProblems(401, 403)
+  @ApiProblems()
   async signOut(
     @CurrentPerson() person: Person,
     @Res({ passthrough: true }) response: Response,
@@ -60,7 +60,7 @@ export class SessionController {
   @HttpCode(204)
   @ApiOperation({ summary: 'Change the own password; ends the other sessions of the account' })
   @ApiNoContentResponse({ description: 'Changed' })
-  @ApiProblems(400, 401, 403, 422, 429)
+  @ApiProblems(400, 422)
   changePassword(
     @Body() passwords: ChangePasswordDto,
     @CurrentPerson() person: Person,

@@ -8,21 +8,21 @@ import { UpdateUserDto } from './dto/update-user.dto.js';
 import { toUserDto, UserDto } from './dto/user.dto.js';
 import { UsersService } from './users.service.js';
 
-@ApiTags('Accounts')
+@ApiTags('accounts')
 @Controller('users')
 export class UsersController {
   constructor(private readonly users: UsersService) {}
 
   @Get()
   @ApiOperation({ summary: 'List the accounts, by name' })
-  @ApiProblems(401, 403)
+  @ApiProblems()
   async list(): Promise<UserDto[]> {
     return (await this.users.list()).map(toUserDto);
   }
 
   @Post()
   @ApiOperation({ summary: 'Create an account' })
-  @ApiProblems(400, 401, 403, 409, 422)
+  @ApiProblems(400, 409, 422)
   async create(@Body() wanted: CreateUserDto, @CurrentPerson() person: Person): Promise<UserDto> {
     return toUserDto(await this.users.create(wanted, person.email));
   }
@@ -33,7 +33,7 @@ export class UsersController {
     description:
       'Acts on the next request of whoever is signed in with it. The last administrator stays one.',
   })
-  @ApiProblems(400, 401, 403, 404, 409, 422)
+  @ApiProblems(400, 404, 409, 422)
   async update(
     @Param('userId', ParseIntPipe) userId: number,
     @Body() wanted: UpdateUserDto,
