@@ -22,4 +22,8 @@ export const connectRoutes: RouteObject[] = [
     path: 'connect',
     lazy: async () => ({ Component: (await import('./routes/connect')).ConnectRoute }),
   },
+  {
+    path: 'mailbox',
+    lazy: async () => ({ Component: (await import('./routes/mailbox')).MailboxRoute }),
+  },
 ];

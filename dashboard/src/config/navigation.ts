@@ -31,6 +31,7 @@ export const navigation: NavigationGroup[] = [
       { label: 'Intake', to: paths.intake() },
       { label: 'Docs', to: paths.connect() },
       { label: 'Settings', to: paths.settings() },
+      { label: 'Mailbox', to: paths.mailbox(), shownWhen: ({ localMailbox }) => localMailbox },
     ],
   },
 ];
