@@ -1,7 +1,8 @@
 import { Injectable, type OnModuleInit } from '@nestjs/common';
 import { InjectConnection } from '@nestjs/sequelize';
 import { Sequelize } from 'sequelize-typescript';
-import type { CatalogueProduct, CatalogueStage } from './catalogue.js';
+import { NotFoundError } from '../common/errors.js';
+import { type CatalogueProduct, type CatalogueStage, findStage } from './catalogue.js';
 import { GoldenUnit } from './models/golden-unit.model.js';
 import { LimitSet } from './models/limit-set.model.js';
 import { Product } from './models/product.model.js';
@@ -55,6 +56,15 @@ export class CatalogueService implements OnModuleInit {
 
   find(partNumber: string): CatalogueProduct | undefined {
     return this.byPartNumber.get(partNumber);
+  }
+
+  /** @throws NotFoundError when there is no such product, or it has no such stage. */
+  stageNamed(partNumber: string, stageName: string): { product: CatalogueProduct; stage: CatalogueStage } {
+    const product = this.find(partNumber);
+    const stage = product && findStage(product, stageName);
+    if (product === undefined || stage === undefined)
+      throw new NotFoundError(`The stage "${stageName}" of "${partNumber}"`);
+    return { product, stage };
   }
 
   byStage(stageId: number): { product: CatalogueProduct; stage: CatalogueStage } {

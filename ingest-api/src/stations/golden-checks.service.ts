@@ -2,6 +2,9 @@ import { Injectable, type OnModuleInit } from '@nestjs/common';
 import { InjectConnection } from '@nestjs/sequelize';
 import { QueryTypes } from 'sequelize';
 import { Sequelize } from 'sequelize-typescript';
+import type { CatalogueProduct } from '../products/catalogue.js';
+
+const HOUR_MS = 3_600_000;
 
 /** When each station last measured a golden unit of each product; asked for with every post. */
 @Injectable()
@@ -21,6 +24,16 @@ export class GoldenChecksService implements OnModuleInit {
 
   lastGoldenAt(stationId: number, productId: number): number | null {
     return this.lastAt.get(keyOf(stationId, productId)) ?? null;
+  }
+
+  /** When the station owes its next check, epoch ms; null when it never did one or the product has no golden unit. */
+  dueAt(
+    stationId: number,
+    { productId, goldenCheckHours }: Pick<CatalogueProduct, 'productId' | 'goldenCheckHours'>,
+  ): number | null {
+    const lastAt = this.lastGoldenAt(stationId, productId);
+    if (lastAt === null || goldenCheckHours.size === 0) return null;
+    return lastAt + Math.min(...goldenCheckHours.values()) * HOUR_MS;
   }
 
   note(stationId: number, productId: number, startedAt: number): void {

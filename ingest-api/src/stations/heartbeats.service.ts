@@ -11,7 +11,7 @@ export interface LastHeartbeat {
   clockSkewMs: number | null;
 }
 
-const saveMs = 30_000;
+const SAVE_MS = 30_000;
 
 /** Signs of life, held in memory and written now and then: one may be lost at a power cut, none matters. */
 @Injectable()
@@ -48,7 +48,7 @@ export class HeartbeatsService implements OnModuleInit, OnApplicationShutdown {
     return this.last.get(stationId) ?? null;
   }
 
-  @Interval(saveMs)
+  @Interval(SAVE_MS)
   async save(): Promise<void> {
     if (this.unsaved.size === 0) return;
     const rows = [...this.unsaved].map((stationId) => ({ stationId, ...this.last.get(stationId)! }));
@@ -57,6 +57,6 @@ export class HeartbeatsService implements OnModuleInit, OnApplicationShutdown {
       .run((transaction) =>
         Heartbeat.bulkCreate(rows, { transaction, updateOnDuplicate: ['at', 'clockSkewMs'] }),
       )
-      .catch(() => undefined);
+      .catch(() => undefined); // Lost signs of life are no loss; the next ones come soon.
   }
 }

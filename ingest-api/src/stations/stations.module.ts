@@ -1,5 +1,6 @@
 import { Module } from '@nestjs/common';
 import { ProductsModule } from '../products/products.module.js';
+import { CurrentPlansService } from './current-plans.service.js';
 import { GoldenChecksService } from './golden-checks.service.js';
 import { HeartbeatsController } from './heartbeats.controller.js';
 import { HeartbeatsService } from './heartbeats.service.js';
@@ -15,6 +16,7 @@ import { StationsService } from './stations.service.js';
   providers: [
     StationRegister,
     StationActivityService,
+    CurrentPlansService,
     GoldenChecksService,
     HeartbeatsService,
     StationsService,

@@ -18,6 +18,7 @@ import { Station } from './models/station.model.js';
 import { type StationActivity, StationActivityService } from './station-activity.service.js';
 import { StationRegister } from './station-register.service.js';
 
+/** A station that posted within this time counts as posting. */
 const POSTING_MS = 10 * 60_000;
 
 @Injectable()
@@ -86,12 +87,7 @@ export class StationsService {
 
   /** The earliest golden check owed, over the products whose golden units this station ever measured. */
   private goldenDueAt(stationId: number): string | null {
-    const due = this.catalogue.all().flatMap(({ productId, goldenCheckHours }) => {
-      const lastAt = this.goldenChecks.lastGoldenAt(stationId, productId);
-      return lastAt === null || goldenCheckHours.size === 0
-        ? []
-        : lastAt + Math.min(...goldenCheckHours.values()) * 3_600_000;
-    });
+    const due = this.catalogue.all().flatMap((product) => this.goldenChecks.dueAt(stationId, product) ?? []);
     return due.length === 0 ? null : new Date(Math.min(...due)).toISOString();
   }
 

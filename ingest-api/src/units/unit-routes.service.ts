@@ -1,8 +1,7 @@
 import { Injectable } from '@nestjs/common';
 import { InjectConnection } from '@nestjs/sequelize';
 import { Sequelize } from 'sequelize-typescript';
-import { NotFoundError } from '../common/errors.js';
-import { findStage, neighbours } from '../products/catalogue.js';
+import { neighbours } from '../products/catalogue.js';
 import { CatalogueService } from '../products/catalogue.service.js';
 import { Lot } from '../results/models/lot.model.js';
 import { Unit } from '../results/models/unit.model.js';
@@ -21,10 +20,7 @@ export class UnitRoutesService {
 
   /** A unit never seen before is no fault: it may begin at the first stage. */
   async route(partNumber: string, serialNumber: string, stageName: string): Promise<UnitRouteDto> {
-    const product = this.catalogue.find(partNumber);
-    const stage = product && findStage(product, stageName);
-    if (product === undefined || stage === undefined)
-      throw new NotFoundError(`The stage "${stageName}" of "${partNumber}"`);
+    const { product, stage } = this.catalogue.stageNamed(partNumber, stageName);
     const unit = await Unit.findOne({ where: { productId: product.productId, serialNumber } });
     const [states, lot] = await Promise.all([
       unit === null ? [] : findUnitStages(this.sequelize, [unit.unitId]),
@@ -51,7 +47,7 @@ export class UnitRoutesService {
 }
 
 /** Why the unit shall not be tested here now, the weightiest reason first; null when it may. */
-export function reasonAgainst(facts: RouteFacts): string | null {
+function reasonAgainst(facts: RouteFacts): string | null {
   const { lotHeld, priorStage, priorStagePassed, latestVerdict, attemptsLeft, attempts, stage } = facts;
   if (lotHeld) return 'Its lot is held.';
   if (priorStagePassed === false) return `It has not passed ${priorStage}.`;
