@@ -1,5 +1,6 @@
 import { QueryTypes } from 'sequelize';
 import type { Sequelize } from 'sequelize-typescript';
+import { inList } from '../database/sql.js';
 import type { Breach, BreachState } from './models/breach.model.js';
 
 export type BreachRow = Pick<
@@ -40,16 +41,18 @@ export function findBreaches(
        acknowledged_by AS acknowledgedBy, note, closed_at AS closedAt, closed_by AS closedBy, cause, action,
        products.part_number AS partNumber, stages.name AS stage
      FROM breaches JOIN stages USING (stage_id) JOIN products USING (product_id)
-     WHERE state IN ($states)
+     WHERE state ${inList('$states')}
        ${breachId === undefined ? '' : 'AND breach_id = $breachId'}
        ${before == null ? '' : 'AND breach_id < $before'}
-     ORDER BY breach_id DESC LIMIT $limit`.replace('$states', quoted(states)),
+     ORDER BY breach_id DESC LIMIT $limit`,
     {
-      bind: { limit, ...(breachId !== undefined && { breachId }), ...(before != null && { before }) },
+      bind: {
+        states: JSON.stringify(states),
+        limit,
+        ...(breachId !== undefined && { breachId }),
+        ...(before != null && { before }),
+      },
       type: QueryTypes.SELECT,
     },
   );
 }
-
-/** States are our own words, never a caller's text. */
-const quoted = (states: readonly BreachState[]): string => states.map((state) => `'${state}'`).join(', ');
