@@ -29,7 +29,7 @@ const codesByStatus: Record<number, [code: string, title: string]> = {
 /** The `type` of a problem is a place in the shipped docs. */
 const typeOf = (code: string): string => `/docs/errors#${code}`;
 
-export function problemOf(error: AmpkeepError): Problem {
+function problemOf(error: AmpkeepError): Problem {
   const { code, title, status, message: detail, errors } = error;
   return { type: typeOf(code), title, status, detail, code, ...(errors.length > 0 ? { errors } : {}) };
 }

@@ -5,7 +5,7 @@ import getRawBody from 'raw-body';
 import { AmpkeepError, MalformedError } from '../common/errors.js';
 
 /** 500 points with every property come to about 120 kB. */
-export const LARGEST_POST_BYTES = 1_000_000;
+const LARGEST_POST_BYTES = 1_000_000;
 const inflate = promisify(gunzip);
 
 /** The body arrived whole, but can't be unpacked. */

@@ -11,7 +11,7 @@ import { BcryptThread } from './bcrypt-thread.js';
  */
 const bcryptCost = { serve: 12, demo: 4 } as const;
 
-export const LEAST_PASSWORD_CHARACTERS = 12;
+const LEAST_PASSWORD_CHARACTERS = 12;
 
 const QUEUE_LIMIT = 40;
 

@@ -2,7 +2,7 @@ import { DateTime } from 'luxon';
 import type { ProductFacts } from '../circuit/product-facts.js';
 
 /** Year and ISO week in four digits: 2648 is week 48 of 2026. */
-export function weekCode(at: Date): string {
+function weekCode(at: Date): string {
   return DateTime.fromJSDate(at, { zone: 'utc' }).toFormat('kkWW');
 }
 

@@ -34,7 +34,7 @@ export function describeJudgement(measure: MeasureJudgement): string {
 }
 
 /** The measured figure: a clause without full stop, e.g. `Setpoint error is 0.376 ± 0.021 %`. */
-export function describeFinding(measure: MeasureJudgement): string {
+function describeFinding(measure: MeasureJudgement): string {
   const { label } = describeMeasure(measure.name);
   if (measure.value === null) return `${label} has no value: ${inWords(measure.reason ?? 'notMeasured')}`;
   return `${label} is ${describeValue(measure, measure.value)}`;

@@ -68,7 +68,7 @@ export function globalRisk({
  *
  * @see JCGM 106:2012, 9.3
  */
-export function nonconformingShare(prior: Prior, { lower, upper }: ToleranceInterval): number {
+function nonconformingShare(prior: Prior, { lower, upper }: ToleranceInterval): number {
   const below = lower === null ? 0 : prior.cumulative(lower);
   const above = upper === null ? 0 : 1 - prior.cumulative(upper);
   return below + above;

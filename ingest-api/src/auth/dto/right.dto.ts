@@ -1,7 +1,7 @@
 import { ApiProperty } from '@nestjs/swagger';
 import { type Role, roles } from '../roles.js';
 
-export const accessKinds = ['public', 'station', 'anySignedIn', 'roles'] as const;
+const accessKinds = ['public', 'station', 'anySignedIn', 'roles'] as const;
 export type AccessKind = (typeof accessKinds)[number];
 
 /** One row of the table of rights. */

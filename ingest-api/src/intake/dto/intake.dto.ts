@@ -3,7 +3,7 @@ import type { Verdict } from '../../analysis/analysis.types.js';
 import { PageQueryDto } from '../../common/page-query.dto.js';
 import { ProblemErrorDto } from '../../common/problem.dto.js';
 
-export const intakeKinds = ['all', 'accepted', 'refused'] as const;
+const intakeKinds = ['all', 'accepted', 'refused'] as const;
 
 export class IntakeQueryDto extends PageQueryDto {
   @IsOptional() @IsIn(intakeKinds) kind?: (typeof intakeKinds)[number] = 'all';

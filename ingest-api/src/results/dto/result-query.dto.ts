@@ -2,7 +2,7 @@ import { IsIn, IsOptional, IsString, MaxLength } from 'class-validator';
 import { PageQueryDto } from '../../common/page-query.dto.js';
 
 export const verdicts = ['pass', 'fail', 'notProven', 'unjudged', 'aborted'] as const;
-export const runKinds = ['production', 'golden', 'study', 'practice'] as const;
+const runKinds = ['production', 'golden', 'study', 'practice'] as const;
 
 export class ResultQueryDto extends PageQueryDto {
   @IsOptional() @IsString() @MaxLength(64) partNumber?: string;

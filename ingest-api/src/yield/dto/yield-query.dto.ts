@@ -1,9 +1,9 @@
 import { IsIn, IsOptional, IsString, Matches, MaxLength } from 'class-validator';
 
-export const bucketKinds = ['hour', 'day', 'week'] as const;
+const bucketKinds = ['hour', 'day', 'week'] as const;
 export type BucketKind = (typeof bucketKinds)[number];
 
-export const splitKinds = ['product', 'stage', 'station', 'fixture', 'lot', 'programVersion'] as const;
+const splitKinds = ['product', 'stage', 'station', 'fixture', 'lot', 'programVersion'] as const;
 export type SplitKind = (typeof splitKinds)[number];
 
 const DAY_FORM = /^\d{4}-\d{2}-\d{2}$/;
