@@ -1,7 +1,7 @@
 import type { PostedResult } from '@/types/api';
 
 /** Stands in the command until a key was given. */
-export const keyPlaceholder = 'amk_YOUR_KEY';
+const KEY_PLACEHOLDER = 'amk_YOUR_KEY';
 
 /** JSON that people can read: one property a line, one point a line. */
 export function readableJson(post: PostedResult): string {
@@ -20,7 +20,7 @@ function inLine(value: unknown): string {
 export function curlCommand(origin: string, key: string, post: PostedResult): string {
   return [
     `curl -i ${origin}/api/v1/results \\`,
-    `  -H 'X-API-Key: ${quoted(key || keyPlaceholder)}' \\`,
+    `  -H 'X-API-Key: ${quoted(key || KEY_PLACEHOLDER)}' \\`,
     `  -H 'Content-Type: application/json' \\`,
     `  -d '${quoted(readableJson(post))}'`,
   ].join('\n');

@@ -11,8 +11,8 @@ const readings: PostedResult['points'] = [
   { loadVolts: 7.2, outputAmps: 0.00050128 },
   { loadVolts: 8, outputAmps: 0.00050122 },
 ];
-const readingsNominalAmps = 0.0005;
-const readingsTopVolts = 8;
+const READINGS_NOMINAL_AMPS = 0.0005;
+const READINGS_TOP_VOLTS = 8;
 
 export interface ExampleIdentity {
   resultId: string;
@@ -26,8 +26,8 @@ export interface ExampleIdentity {
  */
 export function examplePost(product: Product, stage: string, identity: ExampleIdentity): PostedResult {
   const { nominalAmps, complianceLowVolts: low, complianceHighVolts: high } = product;
-  const amps = nominalAmps / readingsNominalAmps;
-  const volts = (high - low) / readingsTopVolts;
+  const amps = nominalAmps / READINGS_NOMINAL_AMPS;
+  const volts = (high - low) / READINGS_TOP_VOLTS;
   return {
     resultId: identity.resultId,
     runKind: 'practice',

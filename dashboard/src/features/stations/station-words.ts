@@ -1,8 +1,6 @@
 import type { Instrument, Station } from '@/types/api';
+import { LARGEST_CLOCK_SKEW_SECONDS } from '@/utils/clock-skew';
 import { formatTime } from '@/utils/format-time';
-
-/** Clocks further apart than this are flagged by the intake as well. */
-const CLOCK_SKEW_SECONDS = 30;
 
 /** A fact in words, and whether it wants somebody. */
 export interface StationFact {
@@ -29,7 +27,7 @@ export function clockFact({ clockSkewSeconds }: Station): StationFact {
   const amount = seconds < 120 ? `${Math.round(seconds)} s` : `${Math.round(seconds / 60)} min`;
   return {
     text: `${amount} ${clockSkewSeconds > 0 ? 'late' : 'early'}`,
-    isTrouble: seconds > CLOCK_SKEW_SECONDS,
+    isTrouble: seconds > LARGEST_CLOCK_SKEW_SECONDS,
   };
 }
 

@@ -7,7 +7,7 @@ import { paths } from '@/config/paths';
 import { errorText } from '@/lib/api-error';
 import type { IntakeItem } from '@/types/api';
 import { newestPostsOptions } from '../api/get-arrival';
-import { resultOptions } from '../api/get-result';
+import { resultOptions } from '@/lib/get-result';
 import styles from './arrival.module.css';
 
 /** Waits for the post with this id and says what became of it, as it happens. */

@@ -1,7 +1,5 @@
 import type { Station } from '@/types/api';
-
-/** Clocks further apart than this are flagged by the intake as well. */
-const CLOCK_SKEW_SECONDS = 30;
+import { LARGEST_CLOCK_SKEW_SECONDS } from '@/utils/clock-skew';
 
 /** What is wrong with a station, worst first; empty for a healthy one. */
 export function stationTroubles(station: Station, now: number): string[] {
@@ -11,6 +9,6 @@ export function stationTroubles(station: Station, now: number): string[] {
     troubles.push('calibration overdue');
   if (station.goldenDueAt !== null && Date.parse(station.goldenDueAt) <= now)
     troubles.push('golden check due');
-  if (Math.abs(station.clockSkewSeconds ?? 0) > CLOCK_SKEW_SECONDS) troubles.push('clock off');
+  if (Math.abs(station.clockSkewSeconds ?? 0) > LARGEST_CLOCK_SKEW_SECONDS) troubles.push('clock off');
   return troubles;
 }

@@ -3,7 +3,7 @@ import { ErrorState } from '@/components/ui/error-state';
 import { Loading } from '@/components/ui/loading';
 import { Section } from '@/components/ui/section';
 import type { ResultDetail, RunItem, Unit } from '@/types/api';
-import { resultOptions } from '../api/get-result';
+import { resultOptions } from '@/lib/get-result';
 import { AttemptList } from './attempt-list';
 import { MeasureTable } from './measure-table';
 import { RawPost } from './raw-post';
