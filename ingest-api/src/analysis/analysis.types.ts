@@ -81,6 +81,8 @@ export interface PreparedPoint {
   direction: PointDirection | null;
   elapsedMs: number | null;
   outputAmpsStdDev: number | null;
+  /** The ammeter range it was read on; null when nobody said. */
+  rangeAmps: number | null;
   overload: boolean;
   /** Whether the straight line was fitted through it. */
   inFit: boolean;
@@ -100,9 +102,10 @@ export interface LineFit {
   rSquared: number;
   degreesOfFreedom: number;
   largestResidualAmps: number;
+  /** Points that set the level of the line, and their mean voltage: those of the main ammeter range if several. */
   pointCount: number;
   meanVolts: number;
-  /** Centred sum of squares of V (V²). */
+  /** Sum of squares of V (V²), centred within each ammeter range. */
   sxx: number;
   weighted: boolean;
 }

@@ -92,6 +92,7 @@ export function anAnalysis(overrides: Partial<SweepAnalysis> = {}): SweepAnalysi
       elapsedMs: null,
       outputAmpsStdDev: null,
       overload: false,
+      rangeAmps: null,
       inFit: true,
       inRange: true,
     })),

@@ -1,14 +1,14 @@
 import type { LineFit, Measure, PreparedPoint, SweepAnalysis, SweepInput } from '../analysis.types.js';
 import { outputImpedance } from '../uncertainty/output-impedance.js';
-import { slopeUncertainty } from '../uncertainty/slope-uncertainty.js';
+import { slopeUncertainty, type SlopeReadings } from '../uncertainty/slope-uncertainty.js';
 import { chooseFitPoints } from './choose-fit-points.js';
 import { complianceVoltage } from './compliance-voltage.js';
 import { findCurvature } from './curvature.js';
 import { findCompliance } from './find-compliance.js';
 import { driftAmps, findRepeatedPoint } from './find-drift.js';
 import { findFlags, type FlagEvidence } from './find-flags.js';
-import { fitSweep } from './fit-sweep.js';
 import { linearityError } from './linearity-error.js';
+import { fitAndLevel, levelUncertainty } from './level-ranges.js';
 import { loadRegulation } from './load-regulation.js';
 import { preparePoints, usableByVoltage } from './prepare-points.js';
 import { referenceCurrent, relativeTo, setpointError } from './reference-current.js';
@@ -47,16 +47,18 @@ export function analyseSweep(input: SweepInput): SweepAnalysis {
 function investigate(input: SweepInput, points: readonly PreparedPoint[]): FlagEvidence {
   const { product, ammeter } = input;
   const sameVolts = sameVoltageWithin(product);
-  const usable = usableByVoltage(points);
-  const readings = usable.map((point) => input.points[point.index]!.outputAmps);
+  const read = usableByVoltage(points);
+  const readings = read.map((point) => input.points[point.index]!.outputAmps);
   const resolution = resolveResolution(readings, ammeter, product.nominalAmps);
-  const compliance = findCompliance(usable, product);
-  const { points: fitted, rangeChanged } = chooseFitPoints(usable, compliance.fitLimitVolts, input);
-  const { fit, steps, weightsUnused } = fitSweep(fitted, sameVolts);
+  const compliance = findCompliance(read, product);
+  const { ranges, rangeChanged } = chooseFitPoints(read, compliance.fitLimitVolts, sameVolts);
+  const { usable, fitted, fit, steps, weightsUnused, rangesFit } = fitAndLevel(read, ranges, sameVolts);
   const findings: SweepFindings = {
     input,
     usable,
     fitted,
+    ranges,
+    levelAmps: 0,
     compliance,
     fit,
     curvature: fit === null ? null : findCurvature(fitted, fit, resolution.writtenStepAmps),
@@ -69,6 +71,7 @@ function investigate(input: SweepInput, points: readonly PreparedPoint[]): FlagE
     endVolts: endTolerance(product),
   };
   addImpedance(findings);
+  if (rangesFit !== null) findings.levelAmps = levelUncertainty(rangesFit, findings.slopeUncertainty);
   return { findings, points, steps, resolutionAssumed: resolution.assumed, rangeChanged, weightsUnused };
 }
 
@@ -82,14 +85,21 @@ function addImpedance(findings: SweepFindings): void {
   if (fit === null || findings.slopeReason !== null) return;
   findings.slopeUncertainty = slopeUncertainty({
     fit,
-    volts: fitted.map((point) => point.loadVolts),
-    amps: fitted.map((point) => point.outputAmps),
+    ...readingsOf(fitted),
+    ranges: findings.ranges.length > 1 ? findings.ranges.map(({ points }) => readingsOf(points)) : undefined,
     sameVolts: findings.sameVolts,
     resolutionAmps: findings.resolutionAmps,
     readingAccuracyPercent: input.ammeter.readingAccuracyPercent ?? 0,
     driftAmps: repeated === null ? null : driftAmps(repeated, fit.slopeSiemens),
   });
   findings.impedance = outputImpedance(fit.slopeSiemens, findings.slopeUncertainty.expanded);
+}
+
+function readingsOf(points: readonly PreparedPoint[]): SlopeReadings {
+  return {
+    volts: points.map((point) => point.loadVolts),
+    amps: points.map((point) => point.outputAmps),
+  };
 }
 
 function measuresOf(findings: SweepFindings): Measure[] {

@@ -17,7 +17,7 @@ export interface Curvature {
  * is significant (t test, two-sided 1 %). With fewer than 5 points the test has next to no degrees of freedom and
  * the bow alone decides: three points are never known to be random.
  *
- * @param points - the fitted points
+ * @param points - the fitted points, at one level where there are several ammeter ranges
  * @param writtenStepAmps - δ, or the last decimal place of the readings when δ is not known
  */
 export function findCurvature(
@@ -42,9 +42,11 @@ export function findCurvature(
   const bowAmps = (Math.abs(product) / sumOfSquares) * largestShape;
   const explained = (product * product) / sumOfSquares;
   const left = Math.max(0, residualSquares - explained);
-  const scatterAmps = n > 3 ? Math.sqrt(left / (n - 3)) : null;
+  const degreesOfFreedom = fit.degreesOfFreedom - 1;
+  const scatterAmps = degreesOfFreedom > 0 ? Math.sqrt(left / degreesOfFreedom) : null;
   const bent = bowAmps > 1.2 * writtenStepAmps;
-  const significant = n < 5 || explained > tQuantile(0.995, n - 3) ** 2 * (left / (n - 3));
+  const significant =
+    degreesOfFreedom < 2 || explained > tQuantile(0.995, degreesOfFreedom) ** 2 * (left / degreesOfFreedom);
   return { bowAmps, scatterAmps, curved: bent && significant };
 }
 

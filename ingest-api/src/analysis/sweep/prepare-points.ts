@@ -32,6 +32,7 @@ export function preparePoints(input: SweepInput): PreparedPoint[] {
       direction: point.direction ?? null,
       elapsedMs: point.elapsedMs ?? null,
       outputAmpsStdDev: point.outputAmpsStdDev ?? null,
+      rangeAmps: point.ammeterRangeAmps ?? input.ammeter.rangeAmps ?? null,
       overload,
       inFit: false,
       inRange: loadVolts >= complianceLowVolts - slack && loadVolts <= complianceHighVolts + slack,
@@ -54,7 +55,9 @@ function isPlausible(reading: number): boolean {
 
 /** The points that carry a reading, by ascending voltage, then current: the order of the post is forgotten. */
 export function usableByVoltage(points: readonly PreparedPoint[]): PreparedPoint[] {
-  return points
-    .filter((point) => !point.overload)
-    .sort((a, b) => a.loadVolts - b.loadVolts || a.outputAmps - b.outputAmps);
+  return points.filter((point) => !point.overload).sort(byVoltage);
+}
+
+export function byVoltage(a: PreparedPoint, b: PreparedPoint): number {
+  return a.loadVolts - b.loadVolts || a.outputAmps - b.outputAmps;
 }

@@ -6,6 +6,7 @@ import type {
   SweepInput,
 } from '../analysis.types.js';
 import { tQuantile } from '../distributions/student-t.js';
+import type { RangePoints } from './choose-fit-points.js';
 import type { Curvature } from './curvature.js';
 import type { ComplianceSearch } from './find-compliance.js';
 import type { RepeatedPoint } from './find-drift.js';
@@ -13,10 +14,14 @@ import type { RepeatedPoint } from './find-drift.js';
 /** What the steps of the analysis found out about one sweep: all that the measures are made of. */
 export interface SweepFindings {
   input: SweepInput;
-  /** Points that carry a reading, by ascending voltage. */
+  /** Points that carry a reading, by ascending voltage, at the level of the main ammeter range. */
   usable: readonly PreparedPoint[];
   /** Those the line was fitted through. */
   fitted: readonly PreparedPoint[];
+  /** The fitted points as read, by ammeter range, the main one first. */
+  ranges: readonly RangePoints[];
+  /** Expanded uncertainty (A) of the level of one ammeter range against another; 0 with one range. */
+  levelAmps: number;
   compliance: ComplianceSearch;
   fit: LineFit | null;
   curvature: Curvature | null;
@@ -33,9 +38,10 @@ export interface SweepFindings {
 
 /**
  * Expanded uncertainty (A) of the difference of two readings: both roundings by bounds (1.2·δ) or the scatter
- * about the line, t·s·√2, whichever is larger. What the meter's gain adds cancels in a difference.
+ * about the line, t·s·√2, whichever is larger, and the level between ammeter ranges where there are several. What
+ * the meter's gain adds cancels in a difference.
  */
-export function differenceUncertainty({ fit, resolutionAmps }: SweepFindings): number {
+export function differenceUncertainty({ fit, resolutionAmps, levelAmps }: SweepFindings): number {
   const scatter = fit === null ? 0 : tQuantile(0.975, fit.degreesOfFreedom) * fit.residualStdDev * Math.SQRT2;
-  return Math.max(1.2 * resolutionAmps, scatter);
+  return Math.hypot(Math.max(1.2 * resolutionAmps, scatter), levelAmps);
 }

@@ -10,16 +10,42 @@ const analysisOf = (points: SweepPoint[], overrides: Parameters<typeof aSweep>[0
   analyseSweep(aSweep({ points, ...bench, ...overrides }));
 
 describe('ranges, weights and coverage', () => {
-  it('another ammeter range stays out of the fit and is flagged', () => {
-    const points = straight.map((point, i) => ({
+  const changingAfter = (last: number) =>
+    straight.map((point, i) => ({
       ...point,
-      outputAmps: point.outputAmps + (i > 6 ? 1e-6 : 0),
-      ammeterRangeAmps: i > 6 ? 1e-2 : 1e-3,
+      outputAmps: point.outputAmps + (i > last ? 1e-6 : 0),
+      ammeterRangeAmps: i > last ? 1e-2 : 1e-3,
     }));
-    const analysis = analysisOf(points);
-    expect(analysis.fit!.pointCount).toBe(7);
+
+  it('another ammeter range has its own intercept and changes neither slope nor load regulation', () => {
+    const analysis = analysisOf(changingAfter(5));
+    expect(analysis.points.every((point) => point.inFit)).toBe(true);
+    expect(analysis.fit).toMatchObject({ degreesOfFreedom: 6, pointCount: 6 });
     expect(analysis.fit!.slopeSiemens).toBeCloseTo(-5e-8, 14);
+    expect(measureOf(analysis, 'referenceCurrent').value).toBeCloseTo(line(4), 12);
+    expect(measureOf(analysis, 'loadRegulation').value).toBeCloseTo(0.08, 2);
+    expect(analysis.flags).toEqual(['driftUnknown']);
+  });
+
+  it('another ammeter range at one step only stays out of everything and is flagged', () => {
+    const analysis = analysisOf(changingAfter(7));
+    expect(analysis.fit!.pointCount).toBe(8);
+    expect(analysis.fit!.slopeSiemens).toBeCloseTo(-5e-8, 14);
+    expect(measureOf(analysis, 'loadRegulation').reason).toBe('notMeasured');
     expect(analysis.flags).toEqual(expect.arrayContaining(['rangeChanged', 'rangeNotCovered']));
+  });
+
+  it('pairs across ranges bound no slope: identical readings prove 1.2·δ over the span of one range', () => {
+    const level = changingAfter(4).map((point) => ({ ...point, outputAmps: 500e-6 }));
+    const { slopeUncertainty, impedance } = analysisOf(level);
+    expect(slopeUncertainty!.fromResolution / (1.2e-9 / 4)).toBeCloseTo(1, 9);
+    expect(impedance!.bound).toBe('atLeast');
+  });
+
+  it('load regulation across ranges knows the level of one to the other no better than the slope', () => {
+    const uncertaintyOf = (points: SweepPoint[]) =>
+      measureOf(analysisOf(points), 'loadRegulation').expandedUncertainty!;
+    expect(uncertaintyOf(changingAfter(4))).toBeGreaterThan(1.5 * uncertaintyOf(straight));
   });
 
   it('weights the fit only when every point carries a standard deviation', () => {

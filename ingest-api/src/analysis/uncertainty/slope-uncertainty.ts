@@ -1,12 +1,18 @@
 import type { LineFit, SlopeUncertainty } from '../analysis.types.js';
 import { tQuantile } from '../distributions/student-t.js';
-import { resolutionUncertainty, slopeBounds } from './resolution-bounds.js';
+import { resolutionUncertainty, slopeBounds, type SlopeBounds } from './resolution-bounds.js';
 
-export interface SlopeEvidence {
-  fit: LineFit;
-  /** Load voltages of the fitted points, ascending, and their currents. */
+/** Load voltages, ascending, and the currents there. */
+export interface SlopeReadings {
   volts: ArrayLike<number>;
   amps: ArrayLike<number>;
+}
+
+/** The readings are those of all fitted points. */
+export interface SlopeEvidence extends SlopeReadings {
+  fit: LineFit;
+  /** The same by ammeter range when there are several: readings bound the slope within a range only. */
+  ranges?: readonly SlopeReadings[];
   /** Voltages within this tolerance are one load step. */
   sameVolts: number;
   resolutionAmps: number;
@@ -28,10 +34,10 @@ export interface SlopeEvidence {
  * (coverage in the proof of the computations).
  */
 export function slopeUncertainty(evidence: SlopeEvidence): SlopeUncertainty {
-  const { fit, volts, amps, sameVolts, resolutionAmps } = evidence;
+  const { fit, volts, resolutionAmps } = evidence;
   const span = volts[volts.length - 1]! - volts[0]!;
   const fromScatter = tQuantile(0.975, fit.degreesOfFreedom) * fit.slopeStdError;
-  const bounds = slopeBounds(volts, amps, resolutionAmps, sameVolts);
+  const bounds = boundsOf(evidence);
   const fromResolution = resolutionUncertainty(fit.slopeSiemens, bounds);
   const fromGain = (2 * Math.abs(fit.slopeSiemens) * evidence.readingAccuracyPercent) / 100 / Math.sqrt(3);
   const fromDrift = (2 * Math.abs(evidence.driftAmps ?? 0)) / (span * Math.sqrt(3));
@@ -42,5 +48,18 @@ export function slopeUncertainty(evidence: SlopeEvidence): SlopeUncertainty {
     fromGain,
     fromDrift,
     resolutionAmps,
+  };
+}
+
+/** The bounds that the ranges allow in common. */
+function boundsOf({ volts, amps, ranges, sameVolts, resolutionAmps }: SlopeEvidence): SlopeBounds | null {
+  if (ranges === undefined) return slopeBounds(volts, amps, resolutionAmps, sameVolts);
+  const bounds = ranges.flatMap(
+    (range) => slopeBounds(range.volts, range.amps, resolutionAmps, sameVolts) ?? [],
+  );
+  if (bounds.length === 0) return null;
+  return {
+    lowest: Math.max(...bounds.map(({ lowest }) => lowest)),
+    highest: Math.min(...bounds.map(({ highest }) => highest)),
   };
 }

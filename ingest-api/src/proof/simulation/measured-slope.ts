@@ -55,6 +55,7 @@ export function pointAt(index: number, loadVolts: number, outputAmps: number): P
     direction: null,
     elapsedMs: null,
     outputAmpsStdDev: null,
+    rangeAmps: null,
     overload: false,
     inFit: true,
     inRange: true,
