@@ -5,6 +5,8 @@ export interface AttemptOrder {
   resultUuid: string;
 }
 
+const beforeAnyFinish = Number.MIN_SAFE_INTEGER;
+
 /**
  * Order of attempts: by start, then finish, then resultId, so that any order of arrival numbers them alike.
  * A result without finish stands before one that has it.
@@ -12,7 +14,7 @@ export interface AttemptOrder {
 export function byAttemptOrder(left: AttemptOrder, right: AttemptOrder): number {
   return (
     left.startedAt - right.startedAt ||
-    (left.finishedAt ?? 0) - (right.finishedAt ?? 0) ||
+    (left.finishedAt ?? beforeAnyFinish) - (right.finishedAt ?? beforeAnyFinish) ||
     compareText(left.resultUuid, right.resultUuid)
   );
 }

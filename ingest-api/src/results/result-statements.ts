@@ -193,14 +193,18 @@ export async function renumberAttempts(
   );
 }
 
-/** The unit's newest result by its own clock, and the lot that it came in last. */
+/**
+ * The unit's newest result, and the lot of its newest result that names one: newest by the order of attempts,
+ * not of arrival.
+ */
 export async function updateUnits(transaction: Transaction, unitIds: readonly number[]): Promise<void> {
+  const newest = 'ORDER BY r.started_at DESC, r.finished_at DESC, r.result_uuid DESC LIMIT 1';
   await runStatement(
     transaction,
-    `UPDATE units SET (latest_result_id, lot_id) =
-       (SELECT r.result_id, coalesce(r.lot_id, units.lot_id) FROM results r
-        WHERE r.unit_id = units.unit_id ORDER BY r.started_at DESC, r.result_id DESC LIMIT 1)
-     WHERE unit_id ${inList('?')}`,
+    `UPDATE units SET
+       latest_result_id = (SELECT r.result_id FROM results r WHERE r.unit_id = units.unit_id ${newest}),
+       lot_id = (SELECT r.lot_id FROM results r WHERE r.unit_id = units.unit_id AND r.lot_id IS NOT NULL ${newest})
+     WHERE unit_id IN (SELECT value FROM json_each(?))`,
     JSON.stringify(unitIds),
   );
 }

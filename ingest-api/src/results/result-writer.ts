@@ -65,7 +65,7 @@ export class ResultWriter implements BatchHandler<PreparedResult, StoreOutcome> 
     let resultId = await nextResultId(transaction);
     const placed = fresh.map((result): PlacedResult => {
       const unitId = unitIds.get(`${result.productId} ${result.serialNumber}`)!;
-      const lot = lotsByName.get(`${result.productId} ${result.lot}`);
+      const lot = result.lot === null ? undefined : lotsByName.get(`${result.productId} ${result.lot}`);
       const attempts = addAttempt(counted, result, unitId);
       const answer = buildAnswer(result, {
         attempt: attempts.own,

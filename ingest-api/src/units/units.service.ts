@@ -1,14 +1,17 @@
-import { Injectable } from '@nestjs/common';
+import { Inject, Injectable } from '@nestjs/common';
 import { InjectConnection } from '@nestjs/sequelize';
 import { Sequelize } from 'sequelize-typescript';
 import { type Page, readCursor, toPage } from '../common/cursor.js';
 import { NotFoundError } from '../common/errors.js';
+import { ENV } from '../config/config.module.js';
+import type { Env } from '../config/env.js';
 import { cautionFor, type CatalogueStage } from '../products/catalogue.js';
 import { CatalogueService } from '../products/catalogue.service.js';
 import type { RunItemDto } from '../results/dto/run-item.dto.js';
 import { Lot } from '../results/models/lot.model.js';
 import { Unit } from '../results/models/unit.model.js';
 import { ResultReadsService } from '../results/result-reads.service.js';
+import { sitePeriod } from '../yield/time-buckets.js';
 import { UnitQueryDto } from './dto/unit-query.dto.js';
 import type { UnitDto, UnitItemDto, UnitStageDto } from './dto/unit.dto.js';
 import { findUnits, findUnitStages, type UnitRow, type UnitStageRow } from './units.queries.js';
@@ -22,12 +25,18 @@ export class UnitsService {
     @InjectConnection() private readonly sequelize: Sequelize,
     private readonly catalogue: CatalogueService,
     private readonly results: ResultReadsService,
+    @Inject(ENV) private readonly env: Env,
   ) {}
 
-  async list({ cursor, limit = 50, ...filter }: UnitQueryDto): Promise<Page<UnitItemDto>> {
-    const rows = await findUnits(this.sequelize, { ...filter, before: readCursor(cursor) }, limit + 1);
-    const [latest, stages] = await Promise.all([
-      this.results.byRowIds(rows.map((row) => row.latestResultId)),
+  async list({ cursor, limit = 50, from, to, ...filter }: UnitQueryDto): Promise<Page<UnitItemDto>> {
+    const period = sitePeriod(from, to, this.env.timeZone);
+    const rows = await findUnits(
+      this.sequelize,
+      { ...filter, ...period, before: readCursor(cursor) },
+      limit + 1,
+    );
+    const [runs, stages] = await Promise.all([
+      this.results.byRowIds(rows.flatMap((row) => [row.latestResultId, row.askedResultId])),
       findUnitStages(
         this.sequelize,
         rows.map((row) => row.unitId),
@@ -37,7 +46,7 @@ export class UnitsService {
       rows,
       limit,
       (row) => row.latestResultId,
-      (row) => this.toItem(row, latest.get(row.latestResultId)!, stages),
+      (row) => this.toItem(row, runs, stages),
     );
   }
 
@@ -60,14 +69,20 @@ export class UnitsService {
     };
   }
 
-  private toItem(row: UnitRow, latest: RunItemDto, states: readonly UnitStageRow[]): UnitItemDto {
+  private toItem(
+    row: UnitRow,
+    runs: ReadonlyMap<number, RunItemDto>,
+    states: readonly UnitStageRow[],
+  ): UnitItemDto {
     const { stages } = this.catalogue.find(row.partNumber)!;
+    const latest = runs.get(row.latestResultId)!;
     return {
       partNumber: row.partNumber,
       serialNumber: row.serialNumber,
       lot: row.lot,
       lastTestedAt: latest.startedAt,
       latest,
+      asked: runs.get(row.askedResultId)!,
       stages: stages.map((stage) => {
         const state = states.find(
           (candidate) => candidate.unitId === row.unitId && candidate.stageId === stage.stageId,
@@ -81,7 +96,7 @@ export class UnitsService {
 function toUnitStage({ name, maxAttempts }: CatalogueStage, results: readonly RunItemDto[]): UnitStageDto {
   const own = results
     .filter((result) => result.stage === name)
-    .sort((a, b) => a.startedAt.localeCompare(b.startedAt));
+    .sort((a, b) => a.startedAt.localeCompare(b.startedAt) || (a.attempt ?? 0) - (b.attempt ?? 0));
   const attempts = own.filter((result) => result.attempt !== null).sort((a, b) => a.attempt! - b.attempt!);
   return { stage: name, maxAttempts, verdict: attempts.at(-1)?.verdict ?? null, results: own };
 }
