@@ -6,7 +6,7 @@ export default defineConfig(({ mode }) => ({
     environment: 'node',
     globalSetup: ['e2e/harness/global-setup.ts'],
     include: [mode === 'screenshots' ? 'e2e/take-screenshots.ts' : 'e2e/*.journey.ts'],
-    testTimeout: 180_000,
+    testTimeout: 300_000,
     hookTimeout: 120_000,
     // Each journey runs a server and a browser of its own.
     maxWorkers: 2,

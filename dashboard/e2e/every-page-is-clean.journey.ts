@@ -8,16 +8,10 @@ import { signInAs } from './harness/sign-in';
 
 journey('every page loads without complaint and is accessible by day and by night', async ({ page }) => {
   await signInAs(page, 'administrator');
-  const addresses = await everyPage(page);
-  for (const address of addresses) {
+  for (const address of await everyPage(page)) {
     await openPage(page, address);
     expect(await page.getByRole('alert').allTextContents(), address).toEqual([]);
     await expectNoOverflow(page);
     await expectAccessible(page);
   }
-  const places = await page
-    .getByRole('navigation', { name: 'Places' })
-    .getByRole('link')
-    .evaluateAll((links) => links.map((link) => link.getAttribute('href')));
-  expect(addresses).toEqual(expect.arrayContaining(places));
 });

@@ -1,9 +1,10 @@
 import type { Page } from 'playwright-core';
+import { navigation } from '../../src/config/navigation';
 import { paths } from '../../src/config/paths';
 import type { BreachPage, IntakePage, UnitPage } from '../../src/types/api';
 import { ask } from './api';
 
-/** The address of every page behind the sign-in, with things of the demonstration where a page shows one thing. */
+/** All places of the navigation and the pages below them, with things of the demonstration where a page shows one. */
 export async function everyPage(page: Page): Promise<string[]> {
   const unit = await oneUnit(page, '/units?verdict=pass&limit=1');
   const failed = await oneUnit(page, '/units?verdict=fail&limit=1');
@@ -12,20 +13,14 @@ export async function everyPage(page: Page): Promise<string[]> {
   const refused = (await ask<IntakePage>(page, '/intake?kind=refused')).items[0];
   if (!open || !closed || !refused) throw new Error('The demonstration lacks a breach or a refused post');
   return [
-    paths.today(),
-    paths.units(),
+    ...navigation.flatMap(({ entries }) => entries.map(({ to }) => to)),
     paths.units({ search: 'nothing has this serial' }),
     unit,
     failed,
-    paths.stations(),
     paths.station('north-1'),
-    paths.breaches(),
     paths.breach(open.breachId),
     paths.breach(closed.breachId),
-    paths.intake(),
     paths.refusedPost(refused.intakeId),
-    paths.connect(),
-    paths.settings(),
     paths.accounts(),
     paths.rights(),
     paths.audit(),
