@@ -4,6 +4,7 @@ import type { Request, Response } from 'express';
 import { stringify } from 'yaml';
 import { resultSchema } from '../results/validate-post.js';
 import { buildOpenApi } from './build-openapi.js';
+import { docsStyle } from './docs-style.js';
 import { errorsPage } from './errors-page.js';
 
 /** The API docs under /docs: everything they need comes from this server. */
@@ -21,6 +22,8 @@ export function serveDocs(app: NestExpressApplication): void {
   });
   SwaggerModule.setup('docs', app, openApi, {
     customSiteTitle: 'Ampkeep API',
+    customCss: docsStyle,
+    customfavIcon: '/favicon.svg',
     swaggerOptions: {
       tryItOutEnabled: false,
       persistAuthorization: false,
