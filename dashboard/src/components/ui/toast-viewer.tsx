@@ -1,6 +1,7 @@
 import Toast from '@douyinfe/semi-ui/lib/es/toast';
 import { useEffect, useRef, type ReactElement } from 'react';
 import type { ToastMessage } from '@/lib/toasts';
+import styles from './toast-viewer.module.css';
 
 const SECONDS = 5;
 
@@ -19,5 +20,5 @@ export function ToastViewer({ messages }: { messages: ToastMessage[] }) {
     shown.current = messages.length;
   }, [messages, toast]);
 
-  return holder;
+  return <div className={styles.viewer}>{holder}</div>;
 }
