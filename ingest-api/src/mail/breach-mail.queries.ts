@@ -4,6 +4,7 @@ import type { BreachMeasure } from '../breaches/models/breach.model.js';
 import type { Slope } from './slope-in-words.js';
 
 export interface FailingUnit extends Slope {
+  resultUuid: string;
   serialNumber: string;
   lot: string | null;
   station: string;
@@ -35,7 +36,7 @@ const breachSql = `
   WHERE breaches.breach_id = ?`;
 
 const unitColumns = `
-  SELECT units.serial_number AS serialNumber, lots.name AS lot, stations.name AS station,
+  SELECT results.result_uuid AS resultUuid, units.serial_number AS serialNumber, lots.name AS lot, stations.name AS station,
     results.started_at AS startedAt, breach_events.text, results.conductance_siemens AS conductanceSiemens,
     results.conductance_uncertainty AS conductanceUncertainty, results.limit_siemens AS limitSiemens
   FROM breach_events

@@ -7,7 +7,10 @@ const site = {
   timeZone: 'Europe/London',
 };
 
+const resultUuid = '0193f3a2-6f0e-7c52-9a3e-5b1f4c0d2e11';
+
 const aFailingUnit = (overrides: Partial<FailingUnit> = {}): FailingUnit => ({
+  resultUuid,
   serialNumber: 'W26480417',
   lot: 'L2648-2',
   station: 'north-2',
@@ -42,7 +45,7 @@ describe('renderBreachMail', () => {
       expect(form).toContain('L2648-2');
       expect(form).toContain('north-2');
       expect(form).toContain('https://ampkeep.fernhollow.example/breaches/12');
-      expect(form).toContain('https://ampkeep.fernhollow.example/units/FH-R500-W/W26480417');
+      expect(form).toContain(`https://ampkeep.fernhollow.example/units/FH-R500-W/W26480417?result=${resultUuid}`);
     }
   });
 
@@ -66,7 +69,7 @@ describe('renderBreachMail', () => {
     const mail = renderBreachMail(facts({ first: unit, others: [unit], eventCount: 2 }), site);
     expect(mail.html).not.toContain('<img');
     expect(mail.html).toContain('&lt;img src=x onerror=&quot;alert(1)&quot;&gt;');
-    expect(mail.html).toContain(`/units/FH-R500-W/${encodeURIComponent(serialNumber)}"`);
+    expect(mail.html).toContain(`/units/FH-R500-W/${encodeURIComponent(serialNumber)}?result=${resultUuid}"`);
     expect(mail.text.match(/^Open the breach: .*$/gm)).toEqual([
       'Open the breach: https://ampkeep.fernhollow.example/breaches/12',
     ]);

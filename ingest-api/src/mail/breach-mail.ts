@@ -25,9 +25,10 @@ const breachLink = ({ breachId }: BreachMailFacts, { publicUrl }: Site): string 
 
 const unitLink = (
   { partNumber }: BreachMailFacts,
-  { serialNumber }: FailingUnit,
+  { serialNumber, resultUuid }: FailingUnit,
   { publicUrl }: Site,
-): string => `${publicUrl}/units/${encodeURIComponent(partNumber)}/${encodeURIComponent(serialNumber)}`;
+): string =>
+  `${publicUrl}/units/${encodeURIComponent(partNumber)}/${encodeURIComponent(serialNumber)}?result=${resultUuid}`;
 
 const timeIn = ({ timeZone }: Site, at: number): string =>
   DateTime.fromMillis(at, { zone: timeZone, locale: 'en-GB' }).toFormat('d LLL yyyy, HH:mm:ss ZZZZ');
