@@ -45,7 +45,9 @@ describe('renderBreachMail', () => {
       expect(form).toContain('L2648-2');
       expect(form).toContain('north-2');
       expect(form).toContain('https://ampkeep.fernhollow.example/breaches/12');
-      expect(form).toContain(`https://ampkeep.fernhollow.example/units/FH-R500-W/W26480417?result=${resultUuid}`);
+      expect(form).toContain(
+        `https://ampkeep.fernhollow.example/units/FH-R500-W/W26480417?result=${resultUuid}`,
+      );
     }
   });
 
