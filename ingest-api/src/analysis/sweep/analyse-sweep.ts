@@ -85,7 +85,8 @@ function addImpedance(findings: SweepFindings): void {
   if (fit === null || findings.slopeReason !== null) return;
   findings.slopeUncertainty = slopeUncertainty({
     fit,
-    ...readingsOf(fitted),
+    volts: fitted.map((point) => point.loadVolts),
+    amps: fitted.map((point) => point.outputAmps),
     ranges: findings.ranges.length > 1 ? findings.ranges.map(({ points }) => readingsOf(points)) : undefined,
     sameVolts: findings.sameVolts,
     resolutionAmps: findings.resolutionAmps,

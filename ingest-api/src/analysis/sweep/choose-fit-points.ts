@@ -40,7 +40,9 @@ export function chooseFitPoints(
   return { ranges, rangeChanged: chosen < candidates.length };
 }
 
-function byRange(points: readonly PreparedPoint[]): RangePoints[] {
+function byRange(points: PreparedPoint[]): RangePoints[] {
+  const first = points[0]?.rangeAmps ?? null;
+  if (points.every((point) => point.rangeAmps === first)) return [{ rangeAmps: first, points }];
   const ranges = new Map<number | null, RangePoints>();
   for (const point of points) {
     const known = ranges.get(point.rangeAmps);

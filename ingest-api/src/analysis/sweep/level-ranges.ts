@@ -32,7 +32,8 @@ export function fitAndLevel(
     const main = ranges[0];
     const onMain = main === undefined ? usable : readOn(main, usable);
     const fitted = main?.points ?? [];
-    return { ...fitSweep(fitted, sameVolts), usable: onMain, fitted, ranges, rangesFit: null };
+    const { fit, steps, weightsUnused } = fitSweep(fitted, sameVolts);
+    return { fit, steps, weightsUnused, usable: onMain, fitted, ranges, rangesFit: null };
   }
   const points = ranges.flatMap((range) => range.points).sort(byVoltage);
   const weighted = areWeights(points);

@@ -43,5 +43,6 @@ export interface SweepFindings {
  */
 export function differenceUncertainty({ fit, resolutionAmps, levelAmps }: SweepFindings): number {
   const scatter = fit === null ? 0 : tQuantile(0.975, fit.degreesOfFreedom) * fit.residualStdDev * Math.SQRT2;
-  return Math.hypot(Math.max(1.2 * resolutionAmps, scatter), levelAmps);
+  const fromReadings = Math.max(1.2 * resolutionAmps, scatter);
+  return levelAmps === 0 ? fromReadings : Math.hypot(fromReadings, levelAmps);
 }
