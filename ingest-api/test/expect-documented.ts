@@ -43,7 +43,7 @@ export function expectDocumented(response: Response): void {
     throw new Error(
       `${method} ${route.template} answered ${response.status}, which openapi.yaml doesn't name`,
     );
-  const contentType = (response.headers['content-type'] as string | undefined)?.split(';')[0];
+  const contentType = response.headers['content-type']?.split(';')[0];
   if (documented.content === undefined) return;
   if (contentType === undefined || documented.content[contentType]?.schema === undefined) {
     throw new Error(

@@ -130,21 +130,19 @@ describe('a result that is odd but can be stored', () => {
     const stricter = limitSets[0]!.limits.map((limit) =>
       limit.measure === 'outputImpedance' ? { ...limit, lower: 50e6 } : limit,
     );
-    await test.app
-      .get(Writer)
-      .run((transaction) =>
-        LimitSet.create(
-          {
-            stageId,
-            version: 2,
-            limits: stricter,
-            releasedBy: 'test',
-            releasedAt: startOfTest - hour,
-            effectiveAt: startOfTest - hour,
-          },
-          { transaction },
-        ),
-      );
+    await test.app.get(Writer).run((transaction) =>
+      LimitSet.create(
+        {
+          stageId,
+          version: 2,
+          limits: stricter,
+          releasedBy: 'test',
+          releasedAt: startOfTest - hour,
+          effectiveAt: startOfTest - hour,
+        },
+        { transaction },
+      ),
+    );
     await catalogue.reload();
     const at = (startedAt: number) =>
       test.post(aResult({ serialNumber: 'LIMITS', stage: 'final', startedAt: iso(startedAt) })).expect(201);

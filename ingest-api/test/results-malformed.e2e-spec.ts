@@ -118,7 +118,7 @@ describe('a post that cannot be taken', () => {
     });
 
     it('and a body that breaks off on the way leaves nothing behind', async () => {
-      const { port } = (test.app.getHttpServer()).address() as AddressInfo;
+      const { port } = test.app.getHttpServer().address() as AddressInfo;
       const unit = 'BROKEN-OFF';
       const text = JSON.stringify(aResult({ serialNumber: unit }));
       const socket = connect(port, '127.0.0.1');

@@ -1,4 +1,3 @@
-import { aResult, sweepOf } from './builders.js';
 import { createTestApp, type TestApp } from './create-test-app.js';
 import { examplePost } from '../src/results/example-post.js';
 
