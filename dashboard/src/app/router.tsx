@@ -3,6 +3,7 @@ import { NotFound } from '@/components/errors/not-found';
 import { RouteError } from '@/components/errors/route-error';
 import { connectRoutes } from './connect-routes';
 import { decideRoutes } from './decide-routes';
+import { learnRoutes } from './learn-routes';
 import { SignedInRoute } from './routes/signed-in';
 import { settingsRoutes } from './settings-routes';
 
@@ -32,6 +33,7 @@ export const routes: RouteObject[] = [
             path: 'units/:partNumber/:serialNumber',
             lazy: async () => ({ Component: (await import('./routes/unit')).UnitRoute }),
           },
+          ...learnRoutes,
           ...decideRoutes,
           ...connectRoutes,
           ...settingsRoutes,

@@ -22,7 +22,7 @@ export const navigation: NavigationGroup[] = [
       { label: 'Units', to: paths.units() },
     ],
   },
-  { label: 'Learn', entries: [] },
+  { label: 'Learn', entries: [{ label: 'Yield', to: paths.yields() }] },
   { label: 'Decide', entries: [{ label: 'Breaches', to: paths.breaches() }] },
   {
     label: 'Connect',

@@ -9,6 +9,8 @@ export const paths = {
       `/units/${encodeURIComponent(partNumber)}/${encodeURIComponent(serialNumber)}`,
       resultId ? { result: resultId } : {},
     ),
+  yields: (query: Record<string, string> = {}) => withQuery('/yield', query),
+  limits: () => '/limits',
   stations: () => '/stations',
   station: (station: string) => `/stations/${encodeURIComponent(station)}`,
   breaches: (query: Record<string, string> = {}) => withQuery('/breaches', query),

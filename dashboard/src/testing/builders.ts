@@ -195,6 +195,7 @@ export function aUnitItem(overrides: Partial<UnitItem> = {}): UnitItem {
     lot: 'L2648-2',
     lastTestedAt: '2026-11-30T08:15:30.120Z',
     latest: aRun(),
+    asked: aRun(),
     stages: [
       { stage: 'board', attempts: 1, verdict: 'pass' },
       { stage: 'final', attempts: 1, verdict: 'pass' },

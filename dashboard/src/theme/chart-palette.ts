@@ -5,7 +5,9 @@ export interface ChartPalette {
   faded: string;
   rule: string;
   grid: string;
+  pass: string;
   fail: string;
+  notProven: string;
   proseFont: string;
   figureFont: string;
 }
@@ -19,7 +21,9 @@ export function readChartPalette(): ChartPalette {
     faded: token('faded'),
     rule: token('rule'),
     grid: token('grid'),
+    pass: token('pass'),
     fail: token('fail'),
+    notProven: token('not-proven'),
     proseFont: token('font-prose'),
     figureFont: token('font-figures'),
   };

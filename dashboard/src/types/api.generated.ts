@@ -1579,6 +1579,8 @@ export interface components {
             lot: string | null;
             lastTestedAt: string;
             latest: components["schemas"]["RunItemDto"];
+            /** @description The result that the question is about (`of`): the latest one, or a first attempt. */
+            asked: components["schemas"]["RunItemDto"];
             stages: components["schemas"]["UnitStageStateDto"][];
         };
         UnitPageDto: {
@@ -3659,12 +3661,22 @@ export interface operations {
                 search?: string;
                 partNumber?: string;
                 lot?: string;
-                /** @description Of the unit's latest result. */
+                /**
+                 * @description Which of a unit's results the filters below are about: its latest, or its first counted attempt at a stage, by
+                 *     which yields are counted.
+                 */
+                of?: "firstAttempt" | "latest";
+                /** @description First site day on which the result started. */
+                from?: string;
+                /** @description Last site day on which the result started, itself included. */
+                to?: string;
                 stage?: string;
-                /** @description Of the unit's latest result. */
                 station?: string;
-                /** @description Of the unit's latest result. */
+                fixture?: string;
+                programVersion?: string;
                 verdict?: "aborted" | "fail" | "notProven" | "pass" | "unjudged";
+                /** @description A measure that the result failed. */
+                failedMeasure?: string;
             };
             header?: never;
             path?: never;

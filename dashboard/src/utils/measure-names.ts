@@ -14,3 +14,6 @@ const names: Record<string, string> = {
 
 /** A measure's name in a sentence; an unknown one as the API calls it. */
 export const measureName = (measure: string): string => names[measure] ?? measure;
+
+/** Every measure by the API's name, in the order in which a sheet lists them. */
+export const measures = Object.keys(names);

@@ -34,6 +34,21 @@ export function timeBuckets(from: string, to: string, by: BucketKind, timeZone: 
   return buckets;
 }
 
+/**
+ * The time from the beginning of one site day to the end of another, either of them left open.
+ * @throws InvalidError for a day that doesn't exist.
+ */
+export function sitePeriod(
+  from: string | undefined,
+  to: string | undefined,
+  timeZone: string,
+): { startedFrom?: number; startedBefore?: number } {
+  return {
+    ...(from !== undefined && { startedFrom: siteDay(from, '/from', timeZone).toMillis() }),
+    ...(to !== undefined && { startedBefore: siteDay(to, '/to', timeZone).plus({ days: 1 }).toMillis() }),
+  };
+}
+
 /** Hours are counted on the time line, so that the hour that a clock change doubles stands there twice. */
 function stepAfter(at: DateTime, by: BucketKind): DateTime {
   return by === 'hour'

@@ -29,7 +29,7 @@ export function UnitsRoute() {
       <UnitFilters filter={filter} />
       {error && !data && <ErrorState error={error} onRetry={() => void refetch()} />}
       {!data && !error && <Loading label="the units" lines={12} />}
-      {data && data.items.length > 0 && <UnitTable units={data.items} />}
+      {data && data.items.length > 0 && <UnitTable units={data.items} of={filter.of} />}
       {data?.items.length === 0 && <NoUnits isFilterSet={isFiltered(filter)} />}
       {data && <Pager nextCursor={data.nextCursor} label="units" />}
     </>

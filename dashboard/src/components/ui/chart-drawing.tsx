@@ -7,7 +7,7 @@ import { useTheme } from '@/theme/use-theme';
 import type { ChartProps } from './chart';
 
 /** Draws with the library; a change of theme draws anew. */
-export function ChartDrawing({ height, option }: Pick<ChartProps, 'height' | 'option'>) {
+export function ChartDrawing({ height, option, onPick }: Omit<ChartProps, 'label'>) {
   const theme = useTheme();
   const drawn = useMemo(() => {
     // The palette is read from the document, which already wears this theme.
@@ -15,6 +15,11 @@ export function ChartDrawing({ height, option }: Pick<ChartProps, 'height' | 'op
     echarts.registerTheme(theme, echartsTheme(palette));
     return option(palette);
   }, [theme, option]);
+  const events = useMemo(
+    (): Record<string, (event: { dataIndex: number }) => void> =>
+      onPick ? { click: ({ dataIndex }) => onPick(dataIndex) } : {},
+    [onPick],
+  );
   return (
     <EChartsReactCore
       key={theme}
@@ -22,6 +27,7 @@ export function ChartDrawing({ height, option }: Pick<ChartProps, 'height' | 'op
       theme={theme}
       option={drawn}
       notMerge
+      onEvents={events}
       opts={{ renderer: 'svg' }}
       style={{ height, width: '100%' }}
     />

@@ -15,6 +15,8 @@ export class UnitItemDto {
   lot!: string | null;
   lastTestedAt!: string;
   latest!: RunItemDto;
+  /** The result that the question is about (`of`): the latest one, or a first attempt. */
+  asked!: RunItemDto;
   stages!: UnitStageStateDto[];
 }
 

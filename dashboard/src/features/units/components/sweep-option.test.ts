@@ -11,7 +11,9 @@ const palette: ChartPalette = {
   faded: '#555',
   rule: '#ccc',
   grid: '#eee',
+  pass: '#0b6b66',
   fail: '#800',
+  notProven: '#6e6600',
   proseFont: 'sans',
   figureFont: 'mono',
 };

@@ -1,14 +1,16 @@
 import { useQuery } from '@tanstack/react-query';
 import { useId } from 'react';
 import { Button } from '@/components/ui/button';
+import { DateField } from '@/components/ui/date-field';
+import { SearchField } from '@/components/ui/search-field';
 import { SelectField } from '@/components/ui/select-field';
 import { productsOptions } from '@/lib/get-products';
 import { stationsOptions } from '@/lib/get-stations';
 import { useSearchChange } from '@/lib/use-search-change';
 import type { Verdict } from '@/types/api';
+import { measureName, measures } from '@/utils/measure-names';
 import { verdictNames } from '@/utils/verdict-names';
-import { isFiltered, type UnitFilter } from '../unit-filter';
-import { SearchField } from './search-field';
+import { filterKeys, isFiltered, type UnitFilter } from '../unit-filter';
 import styles from './unit-filters.module.css';
 
 const any = { value: '', label: 'any' };
@@ -17,6 +19,13 @@ const verdictOptions = [
   any,
   ...(Object.keys(verdictNames) as Verdict[]).map((value) => ({ value, label: verdictNames[value] })),
 ];
+
+const askedOptions: { value: '' | 'firstAttempt'; label: string }[] = [
+  { value: '', label: 'latest result' },
+  { value: 'firstAttempt', label: 'first attempt' },
+];
+const measureOptions = [any, ...measures.map((value) => ({ value, label: measureName(value) }))];
+const noFilter = Object.fromEntries([...filterKeys, 'open'].map((key): [string, string] => [key, '']));
 
 /** Search and filters; everything goes into the address, so that a link shows a colleague the same list. */
 export function UnitFilters({ filter }: { filter: UnitFilter }) {
@@ -60,14 +69,30 @@ export function UnitFilters({ filter }: { filter: UnitFilter }) {
           options={asOptions(stations)}
           onChange={(station) => change({ station })}
         />
+        <DateField label="From" value={filter.from ?? ''} onChange={(from) => change({ from })} />
+        <DateField
+          label="To"
+          value={filter.to ?? ''}
+          {...(filter.from && { min: filter.from })}
+          onChange={(to) => change({ to })}
+        />
+        <SelectField
+          label="By"
+          value={filter.of ?? ''}
+          options={askedOptions}
+          onChange={(of) => change({ of })}
+        />
+        <SelectField
+          label="Failed measure"
+          value={filter.failedMeasure ?? ''}
+          options={measureOptions}
+          onChange={(failedMeasure) => change({ failedMeasure })}
+        />
+        <SearchField label="Fixture" name="fixture" value={filter.fixture ?? ''} />
+        <SearchField label="Program version" name="programVersion" value={filter.programVersion ?? ''} />
         {isFiltered(filter) && (
           <div className={styles.clear}>
-            <Button
-              kind="quiet"
-              onClick={() =>
-                change({ search: '', partNumber: '', lot: '', stage: '', verdict: '', station: '', open: '' })
-              }
-            >
+            <Button kind="quiet" onClick={() => change(noFilter)}>
               Show all units
             </Button>
           </div>

@@ -6,18 +6,27 @@ import { TimeText } from '@/components/ui/time-text';
 import { VerdictMark } from '@/components/ui/verdict-mark';
 import { paths } from '@/config/paths';
 import type { UnitItem, UnitStageState } from '@/types/api';
+import type { UnitFilter } from '../unit-filter';
 import styles from './unit-table.module.css';
 
-const columns: DataColumn<UnitItem>[] = [
+/** The columns tell of the result that was asked for: the latest, or the first attempt. */
+const columnsFor = (of: UnitFilter['of']): DataColumn<UnitItem>[] => [
   {
     key: 'unit',
     head: 'Unit',
     isRowHead: true,
     isTight: true,
-    cell: ({ partNumber, serialNumber, latest }) => (
+    cell: ({ partNumber, serialNumber, latest, asked }) => (
       <span className={styles.unit}>
-        <SlopeMark slope={latest.slope} size={48} />
-        <Link className="figures" to={paths.unit(partNumber, serialNumber)}>
+        <SlopeMark slope={asked.slope} size={48} />
+        <Link
+          className="figures"
+          to={paths.unit(
+            partNumber,
+            serialNumber,
+            asked.resultId === latest.resultId ? undefined : asked.resultId,
+          )}
+        >
           {serialNumber}
         </Link>
       </span>
@@ -25,10 +34,10 @@ const columns: DataColumn<UnitItem>[] = [
   },
   {
     key: 'verdict',
-    head: 'Latest verdict',
+    head: of === 'firstAttempt' ? 'First verdict' : 'Latest verdict',
     isTight: true,
     isSelfExplaining: true,
-    cell: ({ latest }) => <VerdictMark verdict={latest.verdict} />,
+    cell: ({ asked }) => <VerdictMark verdict={asked.verdict} />,
   },
   {
     key: 'impedance',
@@ -36,7 +45,7 @@ const columns: DataColumn<UnitItem>[] = [
     align: 'end',
     isTight: true,
     isSelfExplaining: true,
-    cell: ({ latest }) => <Impedance slope={latest.slope} />,
+    cell: ({ asked }) => <Impedance slope={asked.slope} />,
   },
   {
     key: 'part',
@@ -62,15 +71,15 @@ const columns: DataColumn<UnitItem>[] = [
     head: 'Station',
     isTight: true,
     isSelfExplaining: true,
-    cell: ({ latest }) => latest.station,
+    cell: ({ asked }) => asked.station,
   },
   {
     key: 'tested',
-    head: 'Last tested',
+    head: of === 'firstAttempt' ? 'First tested' : 'Last tested',
     align: 'end',
     isTight: true,
     isSelfExplaining: true,
-    cell: ({ lastTestedAt }) => <TimeText at={lastTestedAt} show="short" />,
+    cell: ({ asked }) => <TimeText at={asked.startedAt} show="short" />,
   },
 ];
 
@@ -88,11 +97,11 @@ function StageStates({ stages }: { stages: UnitStageState[] }) {
   );
 }
 
-export function UnitTable({ units }: { units: UnitItem[] }) {
+export function UnitTable({ units, of }: { units: UnitItem[]; of?: UnitFilter['of'] }) {
   return (
     <DataTable
       caption="Units, last tested first"
-      columns={columns}
+      columns={columnsFor(of)}
       rows={units}
       rowKey={({ partNumber, serialNumber }) => `${partNumber} ${serialNumber}`}
     />

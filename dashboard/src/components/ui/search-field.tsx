@@ -1,6 +1,6 @@
 import { useEffect, useState } from 'react';
-import { TextField } from '@/components/ui/text-field';
 import { useSearchChange } from '@/lib/use-search-change';
+import { TextField } from './text-field';
 
 const TYPING_PAUSE_MS = 250;
 
