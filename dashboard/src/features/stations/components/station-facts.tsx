@@ -13,6 +13,7 @@ export function StationFacts({ station }: { station: Station }) {
         ['Line', station.line],
         ['State', <FactText fact={stateFact(station)} />],
         ['Last post', <TimeText at={station.lastPostAt} show="both" none="none yet" />],
+        ['Last heartbeat', station.lastHeartbeatAt && <TimeText at={station.lastHeartbeatAt} show="both" />],
         ['Posts today', <PostsToday station={station} />],
         ['Refused today', <RefusedToday station={station} />],
         ['Its clock', <FactText fact={clockFact(station)} />],
