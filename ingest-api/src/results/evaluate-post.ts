@@ -53,6 +53,9 @@ const OVERLOAD_CODE = 9e36;
 /** No meter resolves less; what lies below is the dust of somebody's arithmetic, and would underflow in ours. */
 const SMALLEST_READING = 1e-30;
 
+/** A station's clock may be this far off before it is flagged. */
+const TOLERATED_SKEW_MS = 30_000;
+
 /** Computes and judges a valid post: measures, verdict and flags. Pure. */
 export function evaluatePost(post: PostedResult, context: EvaluationContext): Evaluation {
   const { product, stage } = context;
@@ -156,7 +159,7 @@ function circumstances(
       'finishedBeforeStarted',
       post.finishedAt !== undefined && Date.parse(post.finishedAt) < Date.parse(post.startedAt),
     ],
-    ['clockSkew', sentAt !== null && Math.abs(sentAt - receivedAt) > 30_000],
+    ['clockSkew', sentAt !== null && Math.abs(sentAt - receivedAt) > TOLERATED_SKEW_MS],
     ['goldenPostedAsProduction', runKind === 'golden' && (post.runKind ?? 'production') === 'production'],
     [
       'instrumentMismatch',

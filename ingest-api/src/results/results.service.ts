@@ -3,7 +3,7 @@ import type { Request } from 'express';
 import { DateTime } from 'luxon';
 import { BreachRecorder } from '../breaches/breach-recorder.js';
 import type { StationPrincipal } from '../auth/principals.js';
-import { AmpkeepError, type ErrorPlace, InvalidError } from '../common/errors.js';
+import { AmpkeepError } from '../common/errors.js';
 import { CLOCK, type Clock, ENV } from '../config/config.module.js';
 import type { Env } from '../config/env.js';
 import { Writer } from '../database/writer.js';
@@ -13,6 +13,7 @@ import { findStage } from '../products/catalogue.js';
 import { CatalogueService } from '../products/catalogue.service.js';
 import { GoldenChecksService } from '../stations/golden-checks.service.js';
 import { StationRegister } from '../stations/station-register.service.js';
+import { checkPost } from './check-post.js';
 import { type EvaluationContext, evaluatePost } from './evaluate-post.js';
 import { ceilingOf } from './impedance-ceiling-of.js';
 import { parsePost } from './parse-post.js';
@@ -21,11 +22,8 @@ import { prepareResult } from './prepare-result.js';
 import type { PreparedResult } from './prepared-result.js';
 import { ResultWriter } from './result-writer.js';
 import type { PostedResult, ResultAnswer } from './result.types.js';
-import { findFaults } from './validate-post.js';
 import { findWarnings } from './warnings.js';
 
-/** How far ahead of the server a station's clock may be. */
-const ALLOWED_LEAD_MS = 5 * 60_000;
 const keptStatuses = new Set([400, 409, 422]);
 
 export interface RecordOptions {
@@ -77,7 +75,10 @@ export class ResultsService {
     let content: unknown;
     try {
       content = parsePost(bytes);
-      const post = this.checked(content);
+      const post = checkPost(content, {
+        now: this.now(),
+        findProduct: (partNumber) => this.catalogue.find(partNumber),
+      });
       return await this.store(this.prepare(bytes, post, station, options), station);
     } catch (error) {
       if (error instanceof AmpkeepError && keptStatuses.has(error.status)) {
@@ -97,62 +98,6 @@ export class ResultsService {
       this.live.publish({ topic: 'results', id: prepared.resultUuid });
     }
     return { isNew: outcome.kind === 'stored', answer: outcome.answer };
-  }
-
-  /** @throws InvalidError when the content is not a result that can be stored. */
-  private checked(content: unknown): PostedResult {
-    const faults = findFaults(content);
-    if (faults.length > 0) throw new InvalidError(faults);
-    const post = content as PostedResult;
-    const places = [...this.timeFaults(post), ...this.nameFaults(post)];
-    if (places.length > 0) throw new InvalidError(places);
-    return post;
-  }
-
-  private timeFaults(post: PostedResult): ErrorPlace[] {
-    const faults: ErrorPlace[] = [];
-    for (const name of ['startedAt', 'finishedAt', 'sentAt'] as const) {
-      const text = post[name];
-      if (text !== undefined && Number.isNaN(Date.parse(text))) {
-        faults.push({
-          pointer: `/${name}`,
-          code: 'time',
-          detail: 'Is no time that exists (a leap second perhaps); give an RFC 3339 time.',
-        });
-      }
-    }
-    if (Date.parse(post.startedAt) > this.now() + ALLOWED_LEAD_MS) {
-      faults.push({
-        pointer: '/startedAt',
-        code: 'inFuture',
-        detail: `Lies more than 5 minutes ahead of the server, whose time is ${new Date(this.now()).toISOString()}. Set the station's clock.`,
-      });
-    }
-    return faults;
-  }
-
-  private nameFaults(post: PostedResult): ErrorPlace[] {
-    const product = this.catalogue.find(post.partNumber);
-    if (product === undefined) {
-      return [
-        {
-          pointer: '/partNumber',
-          code: 'unknownPartNumber',
-          detail: `"${post.partNumber}" is no product here. Mend the name, or have the product created.`,
-        },
-      ];
-    }
-    if (findStage(product, post.stage) === undefined) {
-      const stages = product.stages.map((stage) => stage.name).join(', ') || 'none yet';
-      return [
-        {
-          pointer: '/stage',
-          code: 'unknownStage',
-          detail: `"${post.stage}" is no stage of ${post.partNumber}; its stages are: ${stages}.`,
-        },
-      ];
-    }
-    return [];
   }
 
   private prepare(
