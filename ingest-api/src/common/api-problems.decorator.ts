@@ -15,17 +15,17 @@ const meanings: Record<number, string> = {
   503: "Can't be stored now; send again as `Retry-After` says",
 };
 
+/** How OpenAPI tells of a problem document of this status. */
+export const problemResponse = (status: number) => ({
+  description: meanings[status] ?? 'Problem',
+  content: { 'application/problem+json': { schema: { $ref: getSchemaPath(ProblemDto) } } },
+});
+
 /** Documents the problem documents an operation may answer with. 401, 403 and 429 are told everywhere. */
 export function ApiProblems(...statuses: number[]): MethodDecorator & ClassDecorator {
   const all = [...new Set([...statuses, 401, 403, 429])].sort((a, b) => a - b);
   return applyDecorators(
     ApiExtraModels(ProblemDto),
-    ...all.map((status) =>
-      ApiResponse({
-        status,
-        description: meanings[status] ?? 'Problem',
-        content: { 'application/problem+json': { schema: { $ref: getSchemaPath(ProblemDto) } } },
-      }),
-    ),
+    ...all.map((status) => ApiResponse({ status, ...problemResponse(status) })),
   );
 }

@@ -3,6 +3,7 @@ import { DocumentBuilder, type OpenAPIObject, SwaggerModule } from '@nestjs/swag
 import { SESSION_COOKIE } from '../auth/session-cookie.js';
 import { ampkeepVersion } from '../config/version.js';
 import { resultSchema } from '../results/validate-post.js';
+import { completeOperations } from './openapi-operations.js';
 import { withNullUnions } from './openapi-nullables.js';
 
 const description = `Test stations post load-regulation results; Ampkeep keeps and judges them.
@@ -54,7 +55,7 @@ export function buildOpenApi(app: INestApplication): OpenAPIObject {
   const document = SwaggerModule.createDocument(app, builder.build(), {
     operationIdFactory: (controller, method) => `${controller.replace(/Controller$/, '')}_${method}`,
   });
-  const united = withNullUnions(document) as OpenAPIObject;
+  const united = completeOperations(withNullUnions(document) as OpenAPIObject);
   const schemas = { ...united.components?.schemas, ...postedResultSchemas() };
   return { ...united, components: { ...united.components, schemas: sortByName(schemas) } };
 }

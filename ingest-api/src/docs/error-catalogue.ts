@@ -33,10 +33,10 @@ export const errorCatalogue: readonly { code: string; status: number; meaning: s
     remedy: 'Ask someone whose role may; Settings shows the table.',
   },
   {
-    code: 'foreign_origin',
+    code: 'origin_not_allowed',
     status: 403,
     meaning: 'A change was asked for from another site.',
-    remedy: "Use the dashboard's own address.",
+    remedy: "Use the dashboard's own address; a program names it in the header Origin.",
   },
   { code: 'forbidden', status: 403, meaning: 'Not allowed.', remedy: 'See the detail.' },
   {
@@ -44,6 +44,18 @@ export const errorCatalogue: readonly { code: string; status: number; meaning: s
     status: 404,
     meaning: 'There is no such thing, or not for you.',
     remedy: 'Check the address.',
+  },
+  {
+    code: 'method_not_allowed',
+    status: 405,
+    meaning: 'The address exists, but not for this method.',
+    remedy: 'See the API docs.',
+  },
+  {
+    code: 'too_slow',
+    status: 408,
+    meaning: 'The request took too long to arrive.',
+    remedy: 'Send it again, in one go.',
   },
   {
     code: 'result_id_used',
@@ -56,6 +68,30 @@ export const errorCatalogue: readonly { code: string; status: number; meaning: s
     status: 409,
     meaning: 'A station of this name exists.',
     remedy: 'Choose another name.',
+  },
+  {
+    code: 'email_taken',
+    status: 409,
+    meaning: 'An account of this mail address exists.',
+    remedy: 'Change that account, or use another address.',
+  },
+  {
+    code: 'last_administrator',
+    status: 409,
+    meaning: 'It would leave nobody to administer the site.',
+    remedy: 'Make someone else an administrator first.',
+  },
+  {
+    code: 'breach_acknowledged',
+    status: 409,
+    meaning: 'The breach was acknowledged before.',
+    remedy: 'Read it again; add what you know when closing it.',
+  },
+  {
+    code: 'breach_closed',
+    status: 409,
+    meaning: 'The breach is closed.',
+    remedy: 'Read it again; a new failure opens a new one.',
   },
   {
     code: 'too_large',
@@ -86,5 +122,11 @@ export const errorCatalogue: readonly { code: string; status: number; meaning: s
     status: 503,
     meaning: "It can't be stored now; nothing was stored.",
     remedy: 'Keep it and send it again as Retry-After says.',
+  },
+  {
+    code: 'internal',
+    status: 500,
+    meaning: "The fault is on this side; it is in the server's log.",
+    remedy: 'Send it again later; tell the administrator if it stays.',
   },
 ];

@@ -20,7 +20,7 @@ export const pointerOf = (path: readonly (string | number)[]): string =>
  * @throws MalformedError with the places.
  */
 export function parsePost(bytes: Buffer): unknown {
-  const text = decode(bytes);
+  const text = decodeUtf8(bytes);
   const value = parseStrictly(text);
   const errors = hiddenFaults(text);
   if (errors.length > 0)
@@ -31,7 +31,8 @@ export function parsePost(bytes: Buffer): unknown {
   return value;
 }
 
-function decode(bytes: Buffer): string {
+/** Without the byte order mark that some programs begin with. */
+export function decodeUtf8(bytes: Buffer): string {
   try {
     return utf8.decode(bytes);
   } catch {

@@ -14,6 +14,7 @@ import { RunItemDto, toRunItemDto } from './dto/run-item.dto.js';
 import { analysePost } from './evaluate-post.js';
 import { ResultBody } from './models/result-body.model.js';
 import { Result } from './models/result.model.js';
+import { decodeUtf8 } from './parse-post.js';
 import { toResultDetail } from './to-result-detail.js';
 import type { PostedResult } from './result.types.js';
 import { findRunItems, type RunItemFilter } from './run-items.queries.js';
@@ -72,7 +73,7 @@ export class ResultReadsService {
   }
 
   private async post(resultId: number): Promise<PostedResult> {
-    return JSON.parse((await this.body(resultId)).toString('utf8')) as PostedResult;
+    return JSON.parse(decodeUtf8(await this.body(resultId))) as PostedResult;
   }
 
   private async body(resultId: number): Promise<Buffer> {

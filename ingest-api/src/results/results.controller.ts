@@ -5,7 +5,6 @@ import {
   ApiOkResponse,
   ApiOperation,
   ApiProduces,
-  ApiSecurity,
   ApiTags,
 } from '@nestjs/swagger';
 import type { Response } from 'express';
@@ -35,7 +34,6 @@ export class ResultsController {
       '201: stored, on disk. 200: the same resultId with the same content was stored before, this is its answer. ' +
       'A retry is harmless; keep a result until you got 2xx or a 4xx other than 429.',
   })
-  @ApiSecurity('stationKey')
   @ApiBody({
     schema: { $ref: '#/components/schemas/PostedResult' },
     examples: { sweep: { summary: 'Eight load steps', value: examplePost } },
@@ -62,7 +60,6 @@ export class ResultsController {
 
   @Get(':resultId')
   @ApiOperation({ summary: 'One result with its sweep and judging; a station key reads its own' })
-  @ApiSecurity('stationKey')
   @ApiProblems(404)
   detail(@Param('resultId') resultId: string, @Req() request: AmpkeepRequest): Promise<ResultDetailDto> {
     return this.reads.detail(resultId, request.stationPrincipal);
