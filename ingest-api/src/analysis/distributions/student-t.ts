@@ -1,8 +1,12 @@
+import gammaln from '@stdlib/math-base-special-gammaln';
 import cdf from '@stdlib/stats-base-dists-t-cdf';
 import quantile from '@stdlib/stats-base-dists-t-quantile';
 import { requirePositive, requireProbability } from './arguments.js';
 import { normalCdf, normalQuantile } from './normal.js';
 import { cacheQuantile } from './quantile-cache.js';
+
+/** Closer to the middle than this the library's quantile loses its digits, and is 0 in the end. */
+const CENTRE = 1e-6;
 
 const cachedQuantile = cacheQuantile((probability, degreesOfFreedom) =>
   quantile(probability, degreesOfFreedom),
@@ -36,7 +40,16 @@ export function tQuantile(probability: number, degreesOfFreedom: number): number
   requireProbability(probability, 'tQuantile');
   requirePositive(degreesOfFreedom, 'degrees of freedom', 'tQuantile');
   if (degreesOfFreedom === Infinity) return normalQuantile(probability);
+  if (Math.abs(probability - 0.5) < CENTRE) return centralQuantile(probability - 0.5, degreesOfFreedom);
   return cachedQuantile(probability, degreesOfFreedom);
+}
+
+/** Two terms of the series about the middle, z + z³·(ν+1)/(6ν) with z = (p − ½)/f(0), f the density. */
+function centralQuantile(aboveHalf: number, degreesOfFreedom: number): number {
+  const nu = degreesOfFreedom;
+  const densityAtZero = Math.exp(gammaln((nu + 1) / 2) - gammaln(nu / 2)) / Math.sqrt(nu * Math.PI);
+  const z = aboveHalf / densityAtZero;
+  return z + (z ** 3 * (nu + 1)) / (6 * nu);
 }
 
 /**
