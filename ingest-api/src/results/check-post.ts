@@ -9,7 +9,7 @@ const ALLOWED_LEAD_MS = 5 * 60_000;
 interface PostSurroundings {
   /** The server's time, epoch ms. */
   now: number;
-  findProduct(partNumber: string): CatalogueProduct | undefined;
+  findProduct: (partNumber: string) => CatalogueProduct | undefined;
 }
 
 /**
