@@ -20,6 +20,7 @@ import {
   findSiteFaults,
   type SiteDescription,
 } from './site-description.js';
+import { findSiteWarnings } from './site-warnings.js';
 
 /**
  * Adds what a site file describes: products with stages, test plans and a first released limit set, and
@@ -50,7 +51,7 @@ export class SiteSetupService {
       return lines;
     });
     await Promise.all([this.catalogue.reload(), this.register.reload()]);
-    return report;
+    return [...report, ...findSiteWarnings(description as SiteDescription)];
   }
 
   private async addProduct(
