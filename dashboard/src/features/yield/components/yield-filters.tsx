@@ -54,16 +54,10 @@ export function YieldFilters({ query, today }: { query: YieldQuery; today: strin
           options={splitOptions}
           onChange={(split) => change({ split })}
         />
-        <div className={styles.periods} role="group" aria-label="Last days">
+        <div className={styles.periods} role="group" aria-label="Last">
           {PERIODS.map((days) => (
-            <Button
-              key={days}
-              kind="quiet"
-              size="small"
-              aria-label={`Last ${days} days`}
-              onClick={() => change(lastDays(days, today))}
-            >
-              {`${days} d`}
+            <Button key={days} kind="quiet" size="small" onClick={() => change(lastDays(days, today))}>
+              {`${days} days`}
             </Button>
           ))}
         </div>
