@@ -23,7 +23,21 @@ class PreparedDatabase extends sqlite3.Database {
       else this.exec(openingPragmas, (failed) => callback.call(this, failed));
     });
   }
+
+  override all(sql: string, ...rest: unknown[]): this {
+    return super.all(readToTheEnd(sql), ...(rest as []));
+  }
+
+  override run(sql: string, ...rest: unknown[]): this {
+    return super.run(readToTheEnd(sql), ...(rest as []));
+  }
 }
+
+/**
+ * SQLite reads a statement up to its first NUL. Sequelize writes texts into its conditions as they are, so a NUL that
+ * somebody sent stands inside a quoted text: it is put in by function.
+ */
+const readToTheEnd = (sql: string): string => sql.replaceAll('\u0000', `'||char(0)||'`);
 
 export const databaseFile = (dataDir: string): string => join(dataDir, 'ampkeep.sqlite');
 
