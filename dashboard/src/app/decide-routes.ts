@@ -1,7 +1,8 @@
 import type { RouteObject } from 'react-router-dom';
 
-/** What broke a limit, and who does what about it. */
+/** The limits, what broke them, and who does what about it. */
 export const decideRoutes: RouteObject[] = [
+  { path: 'limits', lazy: async () => ({ Component: (await import('./routes/limits')).LimitsRoute }) },
   {
     path: 'breaches',
     lazy: async () => ({ Component: (await import('./routes/breaches')).BreachesRoute }),

@@ -23,7 +23,13 @@ export const navigation: NavigationGroup[] = [
     ],
   },
   { label: 'Learn', entries: [{ label: 'Yield', to: paths.yields() }] },
-  { label: 'Decide', entries: [{ label: 'Breaches', to: paths.breaches() }] },
+  {
+    label: 'Decide',
+    entries: [
+      { label: 'Limits', to: paths.limits() },
+      { label: 'Breaches', to: paths.breaches() },
+    ],
+  },
   {
     label: 'Connect',
     entries: [

@@ -1,4 +1,4 @@
-import type { Product } from '@/types/api';
+import type { LimitSet, Product, TestPlan } from '@/types/api';
 
 export function aProduct(overrides: Partial<Product> = {}): Product {
   return {
@@ -20,6 +20,38 @@ export function aProduct(overrides: Partial<Product> = {}): Product {
       testPlan: null,
       limitSet: null,
     })),
+    ...overrides,
+  };
+}
+
+export function aTestPlan(overrides: Partial<TestPlan> = {}): TestPlan {
+  return {
+    version: 3,
+    loadVolts: [0, 4, 8],
+    referenceVolts: 4,
+    dwellMs: 200,
+    repeatFirst: true,
+    upAndDown: false,
+    ...overrides,
+  };
+}
+
+export function aLimitSet(overrides: Partial<LimitSet> = {}): LimitSet {
+  return {
+    version: 2,
+    releasedAt: '2026-10-30T12:00:00.000Z',
+    effectiveAt: '2026-11-01T00:00:00.000Z',
+    releasedBy: 'Ines Calder',
+    limits: [
+      {
+        measure: 'outputImpedance',
+        lower: 1e7,
+        upper: null,
+        rule: 'guarded',
+        guardFactor: 1,
+        guardedRisk: 0.02275,
+      },
+    ],
     ...overrides,
   };
 }

@@ -995,6 +995,8 @@ export interface components {
             /** @enum {string} */
             rule: "guarded" | "simple";
             guardFactor: number;
+            /** @description Largest risk, 0 to 1, that the guard band leaves of passing a unit that lies just outside a limit. */
+            guardedRisk: number;
         };
         OutboxMailDto: {
             /** @enum {string} */
@@ -1975,6 +1977,24 @@ export interface operations {
                     "application/problem+json": components["schemas"]["ProblemDto"];
                 };
             };
+            /** @description Too large */
+            413: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+            /** @description Content type not read here */
+            415: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
             /** @description Readable, but not valid; see `errors` */
             422: {
                 headers: {
@@ -1986,6 +2006,15 @@ export interface operations {
             };
             /** @description Too many requests; wait as `Retry-After` says */
             429: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+            /** @description Can't be stored now; send again as `Retry-After` says */
+            503: {
                 headers: {
                     [name: string]: unknown;
                 };
@@ -2031,6 +2060,15 @@ export interface operations {
             };
             /** @description Too many requests; wait as `Retry-After` says */
             429: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+            /** @description Can't be stored now; send again as `Retry-After` says */
+            503: {
                 headers: {
                     [name: string]: unknown;
                 };
@@ -2087,6 +2125,24 @@ export interface operations {
                     "application/problem+json": components["schemas"]["ProblemDto"];
                 };
             };
+            /** @description Too large */
+            413: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+            /** @description Content type not read here */
+            415: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
             /** @description Readable, but not valid; see `errors` */
             422: {
                 headers: {
@@ -2098,6 +2154,15 @@ export interface operations {
             };
             /** @description Too many requests; wait as `Retry-After` says */
             429: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+            /** @description Can't be stored now; send again as `Retry-After` says */
+            503: {
                 headers: {
                     [name: string]: unknown;
                 };
@@ -2210,6 +2275,24 @@ export interface operations {
                     "application/problem+json": components["schemas"]["ProblemDto"];
                 };
             };
+            /** @description Too large */
+            413: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+            /** @description Content type not read here */
+            415: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
             /** @description Readable, but not valid; see `errors` */
             422: {
                 headers: {
@@ -2221,6 +2304,15 @@ export interface operations {
             };
             /** @description Too many requests; wait as `Retry-After` says */
             429: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+            /** @description Can't be stored now; send again as `Retry-After` says */
+            503: {
                 headers: {
                     [name: string]: unknown;
                 };
@@ -2298,6 +2390,24 @@ export interface operations {
                     "application/problem+json": components["schemas"]["ProblemDto"];
                 };
             };
+            /** @description Too large */
+            413: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+            /** @description Content type not read here */
+            415: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
             /** @description Readable, but not valid; see `errors` */
             422: {
                 headers: {
@@ -2309,6 +2419,15 @@ export interface operations {
             };
             /** @description Too many requests; wait as `Retry-After` says */
             429: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+            /** @description Can't be stored now; send again as `Retry-After` says */
+            503: {
                 headers: {
                     [name: string]: unknown;
                 };
@@ -2431,6 +2550,15 @@ export interface operations {
                     "application/json": components["schemas"]["StationDto"];
                 };
             };
+            /** @description Not readable as what it should be */
+            400: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
             /** @description Not signed in, or no known API key */
             401: {
                 headers: {
@@ -2458,6 +2586,24 @@ export interface operations {
                     "application/problem+json": components["schemas"]["ProblemDto"];
                 };
             };
+            /** @description Too large */
+            413: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+            /** @description Content type not read here */
+            415: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
             /** @description Readable, but not valid; see `errors` */
             422: {
                 headers: {
@@ -2469,6 +2615,15 @@ export interface operations {
             };
             /** @description Too many requests; wait as `Retry-After` says */
             429: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+            /** @description Can't be stored now; send again as `Retry-After` says */
+            503: {
                 headers: {
                     [name: string]: unknown;
                 };
@@ -2593,6 +2748,24 @@ export interface operations {
                     "application/problem+json": components["schemas"]["ProblemDto"];
                 };
             };
+            /** @description Too large */
+            413: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+            /** @description Content type not read here */
+            415: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
             /** @description Readable, but not valid; see `errors` */
             422: {
                 headers: {
@@ -2604,6 +2777,15 @@ export interface operations {
             };
             /** @description Too many requests; wait as `Retry-After` says */
             429: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+            /** @description Can't be stored now; send again as `Retry-After` says */
+            503: {
                 headers: {
                     [name: string]: unknown;
                 };
@@ -2630,6 +2812,15 @@ export interface operations {
                 };
                 content: {
                     "application/json": components["schemas"]["ApiKeyDto"][];
+                };
+            };
+            /** @description Not readable as what it should be */
+            400: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
                 };
             };
             /** @description Not signed in, or no known API key */
@@ -2693,6 +2884,15 @@ export interface operations {
                     "application/json": components["schemas"]["CreatedApiKeyDto"];
                 };
             };
+            /** @description Not readable as what it should be */
+            400: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
             /** @description Not signed in, or no known API key */
             401: {
                 headers: {
@@ -2720,6 +2920,24 @@ export interface operations {
                     "application/problem+json": components["schemas"]["ProblemDto"];
                 };
             };
+            /** @description Too large */
+            413: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+            /** @description Content type not read here */
+            415: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
             /** @description Readable, but not valid; see `errors` */
             422: {
                 headers: {
@@ -2731,6 +2949,15 @@ export interface operations {
             };
             /** @description Too many requests; wait as `Retry-After` says */
             429: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+            /** @description Can't be stored now; send again as `Retry-After` says */
+            503: {
                 headers: {
                     [name: string]: unknown;
                 };
@@ -2760,6 +2987,15 @@ export interface operations {
                     "application/json": components["schemas"]["ApiKeyDto"];
                 };
             };
+            /** @description Not readable as what it should be */
+            400: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
             /** @description Not signed in, or no known API key */
             401: {
                 headers: {
@@ -2789,6 +3025,15 @@ export interface operations {
             };
             /** @description Too many requests; wait as `Retry-After` says */
             429: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+            /** @description Can't be stored now; send again as `Retry-After` says */
+            503: {
                 headers: {
                     [name: string]: unknown;
                 };
@@ -2882,6 +3127,15 @@ export interface operations {
                 };
                 content: {
                     "application/json": components["schemas"]["MailboxMailDto"];
+                };
+            };
+            /** @description Not readable as what it should be */
+            400: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
                 };
             };
             /** @description Not signed in, or no known API key */
@@ -3118,6 +3372,24 @@ export interface operations {
                     "application/problem+json": components["schemas"]["ProblemDto"];
                 };
             };
+            /** @description Too large */
+            413: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+            /** @description Content type not read here */
+            415: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
             /** @description Readable, but not valid; see `errors` */
             422: {
                 headers: {
@@ -3129,6 +3401,15 @@ export interface operations {
             };
             /** @description Too many requests; wait as `Retry-After` says */
             429: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+            /** @description Can't be stored now; send again as `Retry-After` says */
+            503: {
                 headers: {
                     [name: string]: unknown;
                 };
@@ -3206,6 +3487,24 @@ export interface operations {
                     "application/problem+json": components["schemas"]["ProblemDto"];
                 };
             };
+            /** @description Too large */
+            413: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+            /** @description Content type not read here */
+            415: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
             /** @description Readable, but not valid; see `errors` */
             422: {
                 headers: {
@@ -3217,6 +3516,15 @@ export interface operations {
             };
             /** @description Too many requests; wait as `Retry-After` says */
             429: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+            /** @description Can't be stored now; send again as `Retry-After` says */
+            503: {
                 headers: {
                     [name: string]: unknown;
                 };
@@ -3305,6 +3613,15 @@ export interface operations {
                 };
                 content: {
                     "application/json": components["schemas"]["RefusedPostDto"];
+                };
+            };
+            /** @description Not readable as what it should be */
+            400: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
                 };
             };
             /** @description Not signed in, or no known API key */
@@ -3554,6 +3871,15 @@ export interface operations {
                     "application/json": components["schemas"]["ResultDetailDto"];
                 };
             };
+            /** @description Not readable as what it should be */
+            400: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
             /** @description Not signed in, or no known API key */
             401: {
                 headers: {
@@ -3610,6 +3936,15 @@ export interface operations {
                 };
                 content: {
                     "application/json": components["schemas"]["PostedResult"];
+                };
+            };
+            /** @description Not readable as what it should be */
+            400: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
                 };
             };
             /** @description Not signed in, or no known API key */
@@ -3750,6 +4085,15 @@ export interface operations {
                     "application/json": components["schemas"]["UnitDto"];
                 };
             };
+            /** @description Not readable as what it should be */
+            400: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
             /** @description Not signed in, or no known API key */
             401: {
                 headers: {
@@ -3809,6 +4153,15 @@ export interface operations {
                 };
                 content: {
                     "application/json": components["schemas"]["UnitRouteDto"];
+                };
+            };
+            /** @description Not readable as what it should be */
+            400: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
                 };
             };
             /** @description Not signed in, or no known API key */

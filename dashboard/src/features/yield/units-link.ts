@@ -11,10 +11,10 @@ export interface UnitsQuestion {
 /** The units a figure counts: by the same first attempts, of the same days and filters. */
 export function unitsLink(
   query: YieldQuery,
-  days: { from: string; to: string },
+  { from, to }: { from: string; to: string },
   question: UnitsQuestion = {},
 ): string {
-  return paths.units({ of: 'firstAttempt', ...days, ...filtersOf(query), ...question });
+  return paths.units({ of: 'firstAttempt', from, to, ...filtersOf(query), ...question });
 }
 
 /** Where a point of the trend leads: to the units that pull it down, the more frequent kind; else to all of them. */

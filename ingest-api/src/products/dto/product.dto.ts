@@ -1,3 +1,4 @@
+import { riskOfGuardFactor } from '../../analysis/risk/guard-factor.js';
 import type { CircuitKind, MeasureName } from '../../analysis/analysis.types.js';
 import { cautionFor, type CatalogueProduct, type CatalogueStage, inForceAt } from '../catalogue.js';
 
@@ -16,6 +17,8 @@ export class MeasureLimitDto {
   upper!: number | null;
   rule!: 'guarded' | 'simple';
   guardFactor!: number;
+  /** Largest risk, 0 to 1, that the guard band leaves of passing a unit that lies just outside a limit. */
+  guardedRisk!: number;
 }
 
 export class LimitSetDto {
@@ -106,6 +109,7 @@ function toStageDto(stage: CatalogueStage, now: number): ProductStageDto {
         upper,
         rule,
         guardFactor,
+        guardedRisk: riskOfGuardFactor(guardFactor),
       })),
     },
   };

@@ -17,7 +17,7 @@ export function FailingMeasures({ report, query }: FailingMeasuresProps) {
   const { failingMeasures } = report;
   const most = failingMeasures[0]?.units ?? 1;
   const columns: DataColumn<FailingMeasure>[] = [
-    { key: 'measure', head: 'Measure', isRowHead: true, cell: ({ label }) => label },
+    { key: 'measure', head: 'Measure', isRowHead: true, isTight: true, cell: ({ label }) => label },
     {
       key: 'bar',
       head: '',
@@ -46,10 +46,7 @@ export function FailingMeasures({ report, query }: FailingMeasuresProps) {
     },
   ];
   return (
-    <Section
-      title="What fails"
-      note="first attempts by failed measure; a unit that failed two counts in both"
-    >
+    <Section title="What fails" note="first attempts by failed measure; a unit that failed two counts twice">
       {failingMeasures.length > 0 ? (
         <DataTable
           caption="Failing measures, the most frequent first"

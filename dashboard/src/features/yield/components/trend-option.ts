@@ -56,6 +56,8 @@ export function trendOption(
         nameGap: 8,
         splitNumber: 2,
         minInterval: 1,
+        // The slabs are drawn by us, so their sum has to be told.
+        max: roundUp(Math.max(1, ...buckets.map(({ firstPass }) => firstPass.total))),
       },
     ],
     // Text from stations never becomes markup: the tip is drawn, not written into the page.
@@ -76,6 +78,12 @@ export function trendOption(
       ),
     ],
   };
+}
+
+/** The next 1, 2, 4, 6 or 8 times a power of ten: an axis that ends on a round figure. */
+function roundUp(count: number): number {
+  const power = 10 ** Math.floor(Math.log10(count));
+  return power * ([1, 2, 4, 6, 8].find((step) => step * power >= count) ?? 10);
 }
 
 function trendLines({ buckets }: YieldReport): TrendLine[] {

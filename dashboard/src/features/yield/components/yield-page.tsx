@@ -34,8 +34,12 @@ export function YieldPage({ report, query, products, isPending }: YieldPageProps
         </div>
       )}
       <div className={styles.columns}>
-        <FailingMeasures report={report} query={query} />
-        <Retests report={report} />
+        <div>
+          <FailingMeasures report={report} query={query} />
+        </div>
+        <div>
+          <Retests report={report} />
+        </div>
       </div>
     </div>
   );
