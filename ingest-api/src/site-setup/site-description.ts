@@ -69,7 +69,36 @@ const check = createAjv().compile<SiteDescription>(schema);
 /** Where a site file breaks its schema or contradicts itself; none means that it can be applied. */
 export function findSiteFaults(value: unknown): ErrorPlace[] {
   if (!check(value)) return (check.errors ?? []).map(toPlace);
-  return value.products.flatMap((product, index) => contradictions(product, `/products/${index}`));
+  return [
+    ...repeatedPlaces(value),
+    ...value.products.flatMap((product, index) => contradictions(product, `/products/${index}`)),
+  ];
+}
+
+/** What must be unique over the whole file. */
+function repeatedPlaces({ products, stations }: SiteDescription): ErrorPlace[] {
+  const instruments = stations.flatMap(({ instruments = [] }, station) =>
+    instruments.map(({ kind, serialNumber }, index) => ({
+      name: `${kind} ${serialNumber}`,
+      pointer: `/stations/${station}/instruments/${index}/serialNumber`,
+    })),
+  );
+  const twice = (pointer: string, what: string): ErrorPlace => ({
+    pointer,
+    code: 'duplicate',
+    detail: `This ${what} is described twice.`,
+  });
+  return [
+    ...repeated(products, ({ partNumber }) => partNumber).map((index) =>
+      twice(`/products/${index}/partNumber`, 'product'),
+    ),
+    ...repeated(stations, ({ station }) => station).map((index) =>
+      twice(`/stations/${index}/station`, 'station'),
+    ),
+    ...repeated(instruments, ({ name }) => name).map((index) =>
+      twice(instruments[index]!.pointer, 'instrument'),
+    ),
+  ];
 }
 
 function toPlace({ instancePath, keyword, message, params }: ErrorObject): ErrorPlace {
@@ -81,44 +110,54 @@ function toPlace({ instancePath, keyword, message, params }: ErrorObject): Error
   };
 }
 
+type Fault = (place: string, code: string, detail: string) => void;
+
 function contradictions(product: DescribedProduct, pointer: string): ErrorPlace[] {
-  const { complianceLowVolts: low, complianceHighVolts: high } = product;
   const faults: ErrorPlace[] = [];
-  if (low >= high)
-    faults.push({
-      pointer: `${pointer}/complianceHighVolts`,
-      code: 'range',
-      detail: 'Must lie above complianceLowVolts.',
-    });
-  product.stages.forEach((stage, index) => {
-    const at = `${pointer}/stages/${index}`;
-    const { referenceVolts } = stage.testPlan;
-    if (referenceVolts < low || referenceVolts > high) {
-      faults.push({
-        pointer: `${at}/testPlan/referenceVolts`,
-        code: 'range',
-        detail: `Must lie in the promised range, ${low} to ${high} V.`,
-      });
-    }
-    if (product.stages.findIndex((other) => other.stage === stage.stage) !== index) {
-      faults.push({ pointer: `${at}/stage`, code: 'duplicate', detail: 'Two stages bear this name.' });
-    }
-    stage.limits.forEach((limit, place) => {
-      if (limit.lower !== undefined && limit.upper !== undefined && limit.lower >= limit.upper) {
-        faults.push({
-          pointer: `${at}/limits/${place}`,
-          code: 'range',
-          detail: 'lower must lie below upper.',
-        });
-      }
-      if (stage.limits.findIndex((other) => other.measure === limit.measure) !== place) {
-        faults.push({
-          pointer: `${at}/limits/${place}/measure`,
-          code: 'duplicate',
-          detail: 'This measure is limited twice.',
-        });
-      }
-    });
-  });
+  const fault: Fault = (place, code, detail) => faults.push({ pointer: pointer + place, code, detail });
+  if (product.complianceLowVolts >= product.complianceHighVolts) {
+    fault('/complianceHighVolts', 'range', 'Must lie above complianceLowVolts.');
+  }
+  const { goldenUnits = [], stages } = product;
+  for (const index of repeated(goldenUnits, ({ serialNumber }) => serialNumber)) {
+    fault(`/goldenUnits/${index}/serialNumber`, 'duplicate', 'This golden unit is named twice.');
+  }
+  for (const index of repeated(stages, ({ stage }) => stage)) {
+    fault(`/stages/${index}/stage`, 'duplicate', 'Two stages bear this name.');
+  }
+  stages.forEach((stage, index) => checkStage(product, stage, `/stages/${index}`, fault));
   return faults;
+}
+
+function checkStage(product: DescribedProduct, stage: DescribedStage, place: string, fault: Fault): void {
+  const { complianceLowVolts: low, complianceHighVolts: high } = product;
+  const { effectiveAt, testPlan, limits } = stage;
+  if (testPlan.referenceVolts < low || testPlan.referenceVolts > high) {
+    fault(
+      `${place}/testPlan/referenceVolts`,
+      'range',
+      `Must lie in the promised range, ${low} to ${high} V.`,
+    );
+  }
+  if (effectiveAt !== undefined && Number.isNaN(Date.parse(effectiveAt))) {
+    fault(`${place}/effectiveAt`, 'time', 'Is no time that exists (a leap second perhaps).');
+  }
+  for (const index of repeated(limits, ({ measure }) => measure)) {
+    fault(`${place}/limits/${index}/measure`, 'duplicate', 'This measure is limited twice.');
+  }
+  limits.forEach(({ measure, lower, upper }, index) => {
+    if (lower !== undefined && upper !== undefined && lower >= upper) {
+      fault(`${place}/limits/${index}`, 'range', 'lower must lie below upper.');
+    }
+    // Judged in conductance, 1/R: an impedance limit of zero or less has none.
+    if (measure === 'outputImpedance' && Math.min(lower ?? 1, upper ?? 1) <= 0) {
+      fault(`${place}/limits/${index}`, 'range', 'A limit of the output impedance must be above 0 Ω.');
+    }
+  });
+}
+
+/** Places of the entries that bear the name of an earlier one. */
+function repeated<Entry>(entries: readonly Entry[], nameOf: (entry: Entry) => string): number[] {
+  const names = entries.map(nameOf);
+  return names.flatMap((name, index) => (names.indexOf(name) === index ? [] : [index]));
 }

@@ -137,12 +137,15 @@ export class SiteSetupService {
       { name, line, active: true, createdAt: this.now() },
       { transaction },
     );
+    const elsewhere: string[] = [];
     for (const instrument of instruments) {
       const { kind, serialNumber } = instrument;
-      if ((await Instrument.count({ where: { kind, serialNumber }, transaction })) > 0) continue;
-      await Instrument.create({ ...instrument, stationId }, { transaction });
+      if ((await Instrument.count({ where: { kind, serialNumber }, transaction })) > 0) {
+        elsewhere.push(`; ${kind} ${serialNumber} exists, left where it is`);
+      } else await Instrument.create({ ...instrument, stationId }, { transaction });
     }
     await this.audit.record(transaction, { actor, action: 'station.created', subject: name, detail: line });
-    return `station ${name}: added with ${instruments.length} instrument(s)`;
+    const added = instruments.length - elsewhere.length;
+    return `station ${name}: added with ${added} instrument(s)${elsewhere.join('')}`;
   }
 }

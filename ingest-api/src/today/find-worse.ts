@@ -1,14 +1,16 @@
-import { wilsonInterval } from '../analysis/yield/wilson-interval.js';
+import { exactInterval } from '../analysis/yield/exact-interval.js';
 import type { StationActivity } from '../stations/station-activity.service.js';
 import type { TodayChangeDto, TodayProductDto, TodayStageDto } from './dto/today.dto.js';
 
 /** A station that worked today and then said nothing for this long fell silent. */
 const SILENCE_MS = 30 * 60_000;
+/** Fewer units than this ring no bell, however bad they are. */
+const FEWEST_UNITS = 5;
 const percent = (share: number): string => `${(100 * share).toFixed(1)} %`;
 
 /**
- * What is getting worse, in words. A yield counts as worse only when its interval proves it: the whole
- * interval of today lies below last week's share. So a bad first unit of the day rings no bell.
+ * What is getting worse, in words. A yield counts as worse only when its interval proves it: the whole exact
+ * interval of today lies below last week's share. (Wilson's, which is shown, would claim too much of a few units.)
  */
 export function findWorse(
   products: readonly TodayProductDto[],
@@ -41,21 +43,20 @@ export function findWorse(
 }
 
 function firstPassText({ firstPass, previous }: TodayStageDto): string | null {
-  if (
-    firstPass.share === null ||
-    firstPass.high === null ||
-    previous.share === null ||
-    firstPass.high >= previous.share
-  )
-    return null;
+  const interval = provenInterval(firstPass.passed, firstPass.total);
+  if (interval === null || firstPass.share === null || previous.share === null) return null;
+  if (interval.high >= previous.share) return null;
   return `First-pass yield ${percent(firstPass.share)}, was ${percent(previous.share)} over the seven days before`;
 }
+
+const provenInterval = (count: number, total: number) =>
+  total < FEWEST_UNITS ? null : exactInterval(count, total);
 
 /** One in twenty is what an adequate meter should never reach. */
 const TOLERABLE_NOT_PROVEN = 0.05;
 
 function notProvenText({ notProven, firstPass: { total } }: TodayStageDto): string | null {
-  const interval = total === 0 ? null : wilsonInterval(notProven, total);
+  const interval = provenInterval(notProven, total);
   if (interval === null || interval.low <= TOLERABLE_NOT_PROVEN) return null;
   return `${notProven} of ${total} first attempts could not be proven: check ranges and meters`;
 }
