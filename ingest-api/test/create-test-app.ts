@@ -91,7 +91,10 @@ export async function createTestApp(settings: Record<string, string> = {}): Prom
 /** An agent whose every answer must be one that the OpenAPI document names. */
 function documented(server: Server): TestAgent {
   const agent = request.agent(server);
-  agent.use((call: unknown) => void (call as request.Test).set('Sec-Fetch-Site', 'same-origin').expect(expectDocumented));
+  agent.use(
+    (call: unknown) =>
+      void (call as request.Test).set('Sec-Fetch-Site', 'same-origin').expect(expectDocumented),
+  );
   return agent;
 }
 
