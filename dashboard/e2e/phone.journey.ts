@@ -6,12 +6,14 @@ import { journey } from './harness/journey';
 import { openPage, pageIsThere } from './harness/open-page';
 import { expectNoOverflow } from './harness/overflow';
 import { signInAs } from './harness/sign-in';
+import { postFailingUnit } from './harness/stations';
 
 const phone = { viewport: { width: 390, height: 844 }, hasTouch: true, isMobile: true, deviceScaleFactor: 2 };
 
 journey(
   'on a phone every page fits, places are behind the menu, and the chosen light stays',
-  async ({ page }) => {
+  async ({ server, page }) => {
+    await postFailingUnit(server);
     await signInAs(page, 'productionEngineer');
     await pageIsThere(page);
     await expectAccessible(page);

@@ -6,8 +6,10 @@ import { ask } from './harness/api';
 import { journey } from './harness/journey';
 import { openPage } from './harness/open-page';
 import { signInAs } from './harness/sign-in';
+import { postFailingUnit } from './harness/stations';
 
 journey('a viewer may look at everything on the line but change nothing', async ({ server, page }) => {
+  await postFailingUnit(server);
   await signInAs(page, 'viewer');
   const breach = (await ask<BreachPage>(page, '/breaches?state=open')).items[0];
   const breachId = breach?.breachId ?? 0;

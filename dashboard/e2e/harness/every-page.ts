@@ -4,7 +4,10 @@ import { paths } from '../../src/config/paths';
 import type { BreachPage, IntakePage, UnitPage } from '../../src/types/api';
 import { ask } from './api';
 
-/** All places of the navigation and the pages below them, with things of the demonstration where a page shows one. */
+/**
+ * The address of every place of the navigation and of the pages below them. Where a page shows one thing, the
+ * demonstration's; a unit must have failed lately, so that a breach is open.
+ */
 export async function everyPage(page: Page): Promise<string[]> {
   const unit = await oneUnit(page, '/units?verdict=pass&limit=1');
   const failed = await oneUnit(page, '/units?verdict=fail&limit=1');
