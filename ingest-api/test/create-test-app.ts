@@ -57,11 +57,8 @@ export async function createTestApp(settings: Record<string, string> = {}): Prom
   await app.listen(0, '127.0.0.1');
   await createAccounts(app, clock.now);
   await app.get(SiteSetupService, { strict: false }).apply(aSite(), 'test');
-  const server = app.getHttpServer() as Server;
-  const keyFor: TestApp['keyFor'] = async (
-    station,
-    { practice = false, expiresAt = null } = {} as { practice?: boolean; expiresAt?: string },
-  ) => {
+  const server = app.getHttpServer();
+  const keyFor: TestApp['keyFor'] = async (station, { practice = false, expiresAt = null } = {}) => {
     const made = await app
       .get(ApiKeysService, { strict: false })
       .create(station, { label: 'test', practice, expiresAt }, 'test');
