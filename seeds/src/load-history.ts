@@ -7,11 +7,11 @@ import type { HistoryPost } from './history/build-history.js';
 
 export interface HistorySteps {
   before(at: Date): void;
-  after(at: Date, loaded: number): Promise<void>;
+  after(at: Date, group: readonly HistoryPost[]): Promise<void>;
 }
 
-/** Posts that are under way together: the writer commits them as one group. */
-const TOGETHER = 50;
+/** Posts that are under way together: as many as the writer commits as one group. */
+const TOGETHER = 200;
 
 /**
  * Hands a history to the same intake that takes the stations' posts, in the order of arrival. Rejects at the
@@ -22,13 +22,12 @@ const TOGETHER = 50;
 export async function loadHistory(
   app: INestApplicationContext,
   keys: StationKeys,
-  history: readonly HistoryPost[],
+  history: Iterable<HistoryPost>,
   steps: HistorySteps,
 ): Promise<void> {
   const results = app.get(ResultsService, { strict: false });
   const principals = stationPrincipals(app, keys);
-  for (let first = 0; first < history.length; first += TOGETHER) {
-    const group = history.slice(first, first + TOGETHER);
+  for (const group of inGroups(history, TOGETHER)) {
     const at = group.at(-1)?.receivedAt ?? new Date(0);
     steps.before(at);
     await Promise.all(
@@ -39,15 +38,30 @@ export async function loadHistory(
         }),
       ),
     );
-    await steps.after(at, first + group.length);
+    await steps.after(at, group);
   }
 }
 
-/** What the access guard would find for each station's key. */
+function* inGroups<Item>(items: Iterable<Item>, size: number): Generator<Item[], void> {
+  let group: Item[] = [];
+  for (const item of items) {
+    if (group.push(item) < size) continue;
+    yield group;
+    group = [];
+  }
+  if (group.length > 0) yield group;
+}
+
+/** What the access guard would find for each station's key; looked up once a station. */
 export function stationPrincipals(
   app: INestApplicationContext,
   keys: StationKeys,
 ): (station: string) => StationPrincipal {
   const apiKeys = app.get(ApiKeysService, { strict: false });
-  return (station) => apiKeys.authenticate(keys[station] ?? '');
+  const known = new Map<string, StationPrincipal>();
+  return (station) => {
+    const principal = known.get(station) ?? apiKeys.authenticate(keys[station] ?? '');
+    known.set(station, principal);
+    return principal;
+  };
 }

@@ -42,7 +42,7 @@ async function rows<Row extends object>(sql: string): Promise<Row[]> {
 
 describe('a seeded database', () => {
   it('holds the whole history, judged as it was foretold', async () => {
-    const history = buildHistory({ ...demoHistory, days, now }, judgePost);
+    const history = [...buildHistory({ ...demoHistory, days, now }, judgePost)];
     const stored = await rows<{ uuid: string; verdict: string }>(
       'SELECT result_uuid AS uuid, verdict FROM results',
     );
@@ -83,7 +83,7 @@ describe('a seeded database', () => {
       'qualityLead',
       'viewer',
     ]);
-    expect(await rows('SELECT 1 FROM refused_posts')).toHaveLength(3);
+    expect(await rows('SELECT 1 FROM refused_posts')).toHaveLength(1);
   });
 
   it('keeps the stations’ keys to its owner', async () => {
@@ -91,7 +91,7 @@ describe('a seeded database', () => {
   });
 
   it('told how far it was', () => {
-    expect(lines.at(-1)).toMatch(/^ {2}(\d+) of \1 results$/);
+    expect(lines.at(-1)).toMatch(/^ {2}\d+ results$/);
   });
 });
 

@@ -30,7 +30,7 @@ export default async function setUp(project: TestProject): Promise<(() => Promis
   project.provide('demonstration', dataDir);
   const removeAll = () => rm(dataDir, { recursive: true, force: true });
   try {
-    await runProgram(programs.seeds, [], { AMPKEEP_DATA_DIR: dataDir, AMPKEEP_PORT: '0' });
+    await runProgram(programs.seeds, ['--days', '7'], { AMPKEEP_DATA_DIR: dataDir, AMPKEEP_PORT: '0' });
   } catch (error) {
     await removeAll();
     throw error;

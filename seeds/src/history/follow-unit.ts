@@ -2,31 +2,32 @@ import { chooseDisposition } from '@ampkeep/ingest-api/dist/results/disposition.
 import type { StageFacts } from '@ampkeep/station-sim/dist/circuit/product-facts.js';
 import type { RandomSource } from '@ampkeep/station-sim/dist/circuit/random.js';
 import { simulateSweep, sweepMs } from '@ampkeep/station-sim/dist/circuit/simulate-sweep.js';
-import type { ResultPost } from '@ampkeep/station-sim/dist/types/result-post.js';
-import { abortReasons, lineStations, operators } from '../scenario/line.js';
-import { ambientCelsius } from './ambient.js';
+import { abortReasons, lineStations } from '../scenario/line.js';
 import { benchAt } from './bench-at.js';
 import type { Judge } from './judge-post.js';
 import type { PlannedUnit } from './plan-units.js';
+import { runConditions, type SentPost } from './run-conditions.js';
+import type { ShiftCalendar } from './shift-calendar.js';
 
-/** A post as it left its station. */
-export interface SentPost {
-  station: string;
-  sentAt: Date;
-  post: ResultPost;
+/** What every unit's way through the line has in common. */
+export interface LineTime {
+  /** The history ends here. */
+  now: Date;
+  calendar: ShiftCalendar;
+  judge: Judge;
 }
 
 const MINUTE_MS = 60_000;
 const ABORT_SHARE = 0.006;
 
 /** Takes a unit through its stages, testing again as the answers say, and gives its posts up to now. */
-export function followUnit(planned: PlannedUnit, now: Date, judge: Judge, random: RandomSource): SentPost[] {
+export function followUnit(planned: PlannedUnit, time: LineTime, random: RandomSource): SentPost[] {
   const sent: SentPost[] = [];
   let at = planned.startAt;
   for (const stage of planned.product.stages) {
-    const passedAt = testAtStage(planned, stage, at, now, judge, random, sent);
+    const passedAt = testAtStage(planned, stage, at, time, random, sent);
     if (!passedAt) break;
-    at = new Date(passedAt.getTime() + random.between(90, 420) * MINUTE_MS);
+    at = onShift(new Date(passedAt.getTime() + random.between(90, 420) * MINUTE_MS), time, random);
   }
   return sent;
 }
@@ -36,11 +37,11 @@ function testAtStage(
   { product, line, unit }: PlannedUnit,
   stage: StageFacts,
   arrivedAt: Date,
-  now: Date,
-  judge: Judge,
+  time: LineTime,
   random: RandomSource,
   sent: SentPost[],
 ): Date | null {
+  const { now, calendar, judge } = time;
   const stations = lineStations[line][stage.stage];
   let station = random.pick(stations as [string, ...string[]]);
   let startedAt = arrivedAt;
@@ -53,10 +54,7 @@ function testAtStage(
         product,
         stage,
         runKind: 'production',
-        startedAt,
-        operator: own.pick(operators),
-        programVersion: '3.4.1',
-        ambientCelsius: ambientCelsius(startedAt, own),
+        ...runConditions(stage.stage, startedAt, now, calendar, own),
         ...(own.chance(ABORT_SHARE) ? { abortReason: own.pick(abortReasons) } : {}),
       },
       own,
@@ -76,7 +74,16 @@ function testAtStage(
     if (disposition === 'retestElsewhere') {
       station = stations.find((other) => other !== station) ?? station;
     }
-    startedAt = new Date(startedAt.getTime() + Math.round(own.between(3, 15) * MINUTE_MS));
+    startedAt = onShift(new Date(startedAt.getTime() + own.between(3, 15) * MINUTE_MS), time, own);
   }
   return null;
+}
+
+/** A unit that comes to a station when nobody is there waits for somebody. */
+function onShift(at: Date, { now, calendar }: LineTime, random: RandomSource): Date {
+  let later = at.getTime();
+  while (later < now.getTime() && calendar.shiftAt(new Date(later)) === 'off') {
+    later += random.between(30, 150) * MINUTE_MS;
+  }
+  return new Date(Math.round(later));
 }

@@ -3,56 +3,43 @@ import type { StageName } from '@ampkeep/station-sim/dist/circuit/product-facts.
 import { productByPartNumber, stageOf } from '@ampkeep/station-sim/dist/circuit/products.js';
 import type { RandomSource } from '@ampkeep/station-sim/dist/circuit/random.js';
 import { simulateSweep } from '@ampkeep/station-sim/dist/circuit/simulate-sweep.js';
-import { GOLDEN_CHECK_HOURS, lineStations, operators, productMix } from '../scenario/line.js';
-import { ambientCelsius } from './ambient.js';
+import { lineStations, productMix } from '../scenario/line.js';
 import { benchAt } from './bench-at.js';
-import type { SentPost } from './follow-unit.js';
-
-const HOUR_MS = 3_600_000;
+import { runConditions, type SentPost } from './run-conditions.js';
+import type { ShiftCalendar } from './shift-calendar.js';
 
 /** Between two golden runs of one station. */
 const RUN_MS = 4 * 60_000;
 
-/** Every station measures the golden unit of each product it tests, once a check period. */
-export function goldenChecks(now: Date, days: number, random: RandomSource): SentPost[] {
-  const sent: SentPost[] = [];
-  const checks = Math.floor((days * 24) / GOLDEN_CHECK_HOURS);
-  for (let check = checks; check >= 1; check--) {
-    // The last round lies some hours back, so that none is owed the moment the history ends.
-    const roundAt = now.getTime() - (check * GOLDEN_CHECK_HOURS - 18) * HOUR_MS;
-    for (const { station, stage, partNumbers } of checkedStations()) {
-      for (const [index, partNumber] of partNumbers.entries()) {
-        const startedAt = new Date(roundAt + index * RUN_MS);
-        sent.push(goldenRun(station, stage, partNumber, startedAt, now, random));
-      }
-    }
-  }
-  return sent;
+/** Every station measures the golden unit of each product it tests when a shift begins. */
+export function goldenChecks(now: Date, calendar: ShiftCalendar, random: RandomSource): SentPost[] {
+  const stationsToCheck = checkedStations();
+  return calendar.shiftStarts.flatMap((shiftStart) =>
+    stationsToCheck.flatMap(({ station, stage, partNumbers }) =>
+      partNumbers.map((partNumber, index) => {
+        const startedAt = new Date(shiftStart.getTime() + index * RUN_MS);
+        return goldenRun(station, stage, partNumber, startedAt, now, calendar, random);
+      }),
+    ),
+  );
 }
 
 function goldenRun(
   station: string,
-  stage: StageName,
+  stageName: StageName,
   partNumber: string,
   startedAt: Date,
   now: Date,
+  calendar: ShiftCalendar,
   random: RandomSource,
 ): SentPost {
-  const own = random.fork(`golden ${station} ${partNumber} ${now.getTime() - startedAt.getTime()}`);
+  const own = random.fork(`golden ${station} ${partNumber} ${startedAt.toISOString()}`);
   const product = productByPartNumber(partNumber);
-  const run = {
-    product,
-    stage: stageOf(product, stage),
-    runKind: 'golden',
-    startedAt,
-    operator: own.pick(operators),
-    programVersion: '3.4.1',
-    ambientCelsius: ambientCelsius(startedAt, own),
-  } as const;
+  const stage = stageOf(product, stageName);
   const post = simulateSweep(
     goldenUnitOf(partNumber),
     benchAt(station, product, startedAt, now, own),
-    run,
+    { product, stage, runKind: 'golden', ...runConditions(stageName, startedAt, now, calendar, own) },
     own,
   );
   return { station, sentAt: new Date(post.sentAt ?? startedAt), post };

@@ -6,6 +6,7 @@ import { lotName, serialNumber } from '@ampkeep/station-sim/dist/plan/serial-num
 import { LOT_SIZE, productMix, type LineName } from '../scenario/line.js';
 import { stories } from '../scenario/stories.js';
 import { hoursBefore } from './bench-at.js';
+import type { ShiftCalendar } from './shift-calendar.js';
 
 /** A unit and when it first comes to the line. */
 export interface PlannedUnit {
@@ -18,23 +19,26 @@ export interface PlannedUnit {
 export interface PlanUnitsOptions {
   now: Date;
   days: number;
-  unitsPerDay: number;
+  /** How many come to the line in an hour at full speed. */
+  unitsPerHour: number;
 }
 
-const DAY_MS = 86_400_000;
+const HOUR_MS = 3_600_000;
+const DAY_MS = 24 * HOUR_MS;
 
 /** Units were made some days before they come to the line. */
 const MADE_DAYS_BEFORE = 4;
 
-/** By night (22 to 6 o'clock UTC) the line runs at this share of its speed. */
-const NIGHT_SPEED = 0.4;
-
 /** Every unit of the period, in order of arrival, with its lot and what it really is. */
-export function planUnits(options: PlanUnitsOptions, random: RandomSource): PlannedUnit[] {
+export function* planUnits(
+  options: PlanUnitsOptions,
+  calendar: ShiftCalendar,
+  random: RandomSource,
+): Generator<PlannedUnit, void> {
   const draw = random.fork('units');
   const made = new Map<string, number>();
   const lots = createLots(options.now);
-  return arrivals(options, draw).map((startAt) => {
+  for (const startAt of arrivals(options, calendar, draw)) {
     const { partNumber, line } = draw.pick(productMix);
     const product = productByPartNumber(partNumber);
     const madeAt = new Date(startAt.getTime() - MADE_DAYS_BEFORE * DAY_MS);
@@ -44,22 +48,22 @@ export function planUnits(options: PlanUnitsOptions, random: RandomSource): Plan
     const identity = { serialNumber: serialNumber(product, madeAt, running), lot: lot.name };
     const unitOptions = lot.lowEarly ? { earlyVolts: stories.lowEarlyLot.earlyVolts } : {};
     const unit = drawUnit(product, identity, random.fork(`unit ${partNumber} ${running}`), unitOptions);
-    return { product, line, unit, startAt };
-  });
+    yield { product, line, unit, startAt };
+  }
 }
 
-function arrivals({ now, days, unitsPerDay }: PlanUnitsOptions, draw: RandomSource): Date[] {
-  const times: Date[] = [];
-  const nightShare = 8 / 24;
-  const dayGapMs = (DAY_MS / unitsPerDay) * (1 - nightShare + nightShare * NIGHT_SPEED);
+/** Units come as at full speed, and where the line runs slower, only that share of them. */
+function* arrivals(
+  { now, days, unitsPerHour }: PlanUnitsOptions,
+  calendar: ShiftCalendar,
+  draw: RandomSource,
+): Generator<Date, void> {
   let at = now.getTime() - days * DAY_MS;
   while (at < now.getTime()) {
-    times.push(new Date(at));
-    const hour = new Date(at).getUTCHours();
-    const speed = hour >= 22 || hour < 6 ? NIGHT_SPEED : 1;
-    at += Math.round((dayGapMs / speed) * draw.between(0.3, 1.7));
+    const startAt = new Date(at);
+    if (draw.chance(calendar.speedAt(startAt))) yield startAt;
+    at += Math.round((HOUR_MS / unitsPerHour) * draw.between(0.3, 1.7));
   }
-  return times;
 }
 
 interface Lot {

@@ -1,3 +1,5 @@
+import { stories } from './stories.js';
+
 /** How the quality lead's office closes a breach by its measure, once its cause was found. */
 export const breachEndings: Readonly<Record<string, { cause: string; action: string }>> = {
   outputImpedance: {
@@ -28,4 +30,21 @@ export const acknowledgement = {
 } as const;
 
 /** A breach is taken as mended once nothing joined it for so many hours. */
-export const QUIET_HOURS = 10;
+export const QUIET_HOURS = 20;
+
+/** What the stories keep open to the end of the history, from so many hours before it. */
+export const stillOpen: readonly {
+  partNumber: string;
+  stage: string;
+  measure: string;
+  fromHoursAgo: number;
+}[] = [
+  { partNumber: 'FH-R500-W', stage: 'final', measure: 'setpointError', fromHoursAgo: 8 * 24 },
+  {
+    partNumber: stories.lowEarlyLot.partNumber,
+    stage: 'board',
+    measure: 'outputImpedance',
+    fromHoursAgo: stories.lowEarlyLot.hoursAgo,
+  },
+  { ...acknowledgement, fromHoursAgo: stories.poorContact.fromHoursAgo },
+];

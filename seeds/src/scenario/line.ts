@@ -1,4 +1,5 @@
 import type { StageName } from '@ampkeep/station-sim/dist/circuit/product-facts.js';
+import type { Shift } from '../history/shift-calendar.js';
 
 /** Which stations test which stage on which line of Fernhollow Controls. */
 export const lineStations: Readonly<Record<LineName, Readonly<Record<StageName, readonly string[]>>>> = {
@@ -23,12 +24,17 @@ export interface MixEntry {
   line: LineName;
 }
 
-export const operators: readonly [string, ...string[]] = ['B104', 'B117', 'B122', 'B131', 'B140'];
+/** Badge codes by shift. */
+export const operators: Readonly<Record<Shift, readonly [string, ...string[]]>> = {
+  early: ['B104', 'B117', 'B126'],
+  late: ['B122', 'B131'],
+  off: ['B140'],
+};
 
 export const abortReasons: readonly [string, ...string[]] = ['guard opened', 'operator stopped the run'];
 
 /** Units that are released or held together. */
-export const LOT_SIZE = 25;
+export const LOT_SIZE = 40;
 
 /** Hours after which a station owes another check with a golden unit. */
 export const GOLDEN_CHECK_HOURS = 24;

@@ -139,10 +139,33 @@ function measurePoint(
   };
 }
 
-/** Where source and load agree, by bisection: the source's current only falls as its terminal voltage rises. */
+/** Steps of repeated substitution before it is given up, and the relative change that ends it. */
+const SUBSTITUTIONS = 8;
+const SETTLED = 1e-12;
+
+/**
+ * Where source and load agree. The slight slope of a current source lets repeated substitution settle in a few
+ * steps; near saturation it doesn't, and bisection does: the source's current only falls as its terminal voltage
+ * rises.
+ */
 function settledAmps(terminalVolts: (amps: number) => number, sourceAmps: (volts: number) => number): number {
+  const highest = sourceAmps(terminalVolts(0));
+  let amps = highest;
+  for (let step = 0; step < SUBSTITUTIONS; step++) {
+    const next = sourceAmps(terminalVolts(amps));
+    if (Math.abs(next - amps) <= SETTLED * highest) return next;
+    amps = next;
+  }
+  return bisect(terminalVolts, sourceAmps, highest);
+}
+
+function bisect(
+  terminalVolts: (amps: number) => number,
+  sourceAmps: (volts: number) => number,
+  highest: number,
+): number {
   let low = 0;
-  let high = sourceAmps(terminalVolts(0));
+  let high = highest;
   for (let step = 0; step < 50; step++) {
     const middle = (low + high) / 2;
     if (sourceAmps(terminalVolts(middle)) > middle) low = middle;
