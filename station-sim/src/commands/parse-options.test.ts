@@ -43,7 +43,10 @@ describe('the command line', () => {
     ['--rate is "fast"', ['--rate', 'fast']],
     ['--rate is ""', ['--rate', '']],
     ['--url is "localhost:4780"', ['--url', 'localhost:4780']],
-    ['--scenario is "chaos", must be one of steady, one-fail', ['--scenario', 'chaos']],
+    [
+      '--scenario is "chaos", must be one of steady, one-fail, drift, bad-lot, coarse-meter, poor-contact, outage',
+      ['--scenario', 'chaos'],
+    ],
     ['--speed', ['--speed', '3']],
   ])('is refused: %s', (message, argv) => {
     expect(() => parse('--key-file', 'k', ...argv)).toThrow(UsageError);

@@ -1,6 +1,6 @@
 import { parseArgs } from 'node:util';
 import { stations } from '../circuit/stations.js';
-import { scenarios, type Scenario } from '../plan/build-plan.js';
+import { scenarios, type Scenario } from '../plan/scenarios.js';
 
 export interface SimOptions {
   stations: number;
@@ -31,9 +31,14 @@ export const helpText = `Simulated test stations that post load-regulation resul
   --rate N          tests per second of all stations together, 0.01 to 200    (1)
   --count N         how many tests to run; 0 goes on until Ctrl-C             (100)
   --seed TEXT       same seed, same units and readings; without it every run makes other units
-  --scenario NAME   ${scenarios.join(' | ')}                                         (steady)
-                      steady     units go from board to final, 2 to 3 % fail, golden runs now and then
-                      one-fail   one unit whose output impedance is clearly too low
+  --scenario NAME   what happens on the line                                  (steady)
+                      steady        units go from board to final, 2 to 3 % fail, golden runs now and then
+                      one-fail      one unit whose output impedance is clearly too low
+                      drift         the last station's ammeter gains 0.02 % with every test, up to 2 %
+                      bad-lot       every FH-R500-M comes from a lot with a low Early voltage
+                      coarse-meter  the last station's ammeter stayed on its 100 mA range: not proven
+                      poor-contact  fixture 2 of the last station loses voltage now and then
+                      outage        the network is away for a while; what waited arrives late and out of order
   --url ADDRESS     where Ampkeep answers                                     (http://localhost:4780)
   --spool FILE      results that could not be sent yet                        (data/station-sim.spool.ndjson)
   --quiet           no progress line

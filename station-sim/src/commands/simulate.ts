@@ -2,6 +2,7 @@ import { createRandom } from '../circuit/random.js';
 import { buildPlan } from '../plan/build-plan.js';
 import { progressLine, summaryLines } from '../report/progress.js';
 import type { Tally } from '../report/tally.js';
+import { outageOf } from '../run/outage.js';
 import { runSimulation } from '../run/run-simulation.js';
 import { systemClock } from '../send/clock.js';
 import { httpPoster } from '../send/post-result.js';
@@ -32,6 +33,7 @@ export async function simulate(options: SimOptions, stop: AbortSignal, output: O
         stations: options.stations,
         testsPerSecond: options.testsPerSecond,
         count: options.count,
+        outage: outageOf(options.scenario, options.count),
       },
       {
         clock: systemClock,

@@ -3,11 +3,9 @@ import type { ProductFacts, StageName } from '../circuit/product-facts.js';
 import { productByPartNumber, products } from '../circuit/products.js';
 import type { RandomSource } from '../circuit/random.js';
 import { stations } from '../circuit/stations.js';
-import { drawUnit, type DrawOptions, type Unit } from '../circuit/unit.js';
+import { drawUnit, type Unit } from '../circuit/unit.js';
+import { unitOptionsOf, type Scenario } from './scenarios.js';
 import { lotName, serialNumber } from './serial-numbers.js';
-
-export const scenarios = ['steady', 'one-fail'] as const;
-export type Scenario = (typeof scenarios)[number];
 
 export interface PlanOptions {
   scenario: Scenario;
@@ -19,8 +17,9 @@ export interface PlanOptions {
 
 /** One unit put on one station for one stage. */
 export interface PlannedTest {
-  /** Names this unit's or golden run's place in the plan. */
-  label: string;
+  scenario: Scenario;
+  /** This unit's or golden run's place in the plan. */
+  number: number;
   runKind: 'production' | 'golden';
   unit: Unit;
   stage: StageName;
@@ -50,7 +49,7 @@ const productMix: readonly [string, ...string[]] = [
 const operators: readonly [string, ...string[]] = ['B104', 'B117', 'B122', 'B131'];
 
 /**
- * The first test of every unit, in order and without end for `steady`; what follows depends on the answers
+ * The first test of every unit, in order and without end but for `one-fail`; what follows depends on the answers
  * (see `nextTest`). Pure: same options and source, same plan.
  */
 export function* buildPlan(options: PlanOptions, random: RandomSource): Generator<PlannedTest, void> {
@@ -59,7 +58,7 @@ export function* buildPlan(options: PlanOptions, random: RandomSource): Generato
   const firstNumber = draw.integer(10_000, 900_000);
   if (options.scenario === 'one-fail') {
     const product = productByPartNumber('FH-R500-W');
-    const unit = newUnit(product, firstNumber, options, random, { defect: 'leakyTransistor' });
+    const unit = newUnit(product, firstNumber, options, random);
     yield { ...placement(0, options, draw), ...unitTest(unit), followed: false };
     return;
   }
@@ -83,24 +82,24 @@ function goldenTest(draw: RandomSource) {
   return { runKind: 'golden', unit, stage: 'final', followed: false } as const;
 }
 
-function newUnit(
-  product: ProductFacts,
-  running: number,
-  options: PlanOptions,
-  random: RandomSource,
-  drawOptions: DrawOptions = {},
-): Unit {
+function newUnit(product: ProductFacts, running: number, options: PlanOptions, random: RandomSource): Unit {
   const identity = {
     serialNumber: serialNumber(product, options.madeAt, running),
     lot: lotName(options.madeAt, FIRST_LOT + products.indexOf(product)),
   };
-  return drawUnit(product, identity, random.fork(`unit ${running}`), drawOptions);
+  return drawUnit(
+    product,
+    identity,
+    random.fork(`unit ${running}`),
+    unitOptionsOf(options.scenario, product),
+  );
 }
 
 function placement(index: number, options: PlanOptions, draw: RandomSource) {
   const facts = stations[index % options.stations] ?? stations[0];
   return {
-    label: String(index),
+    scenario: options.scenario,
+    number: index,
     station: facts.station,
     fixture: draw.pick(facts.fixtures),
     channel: String(1 + (Math.floor(index / options.stations) % 8)),

@@ -1,11 +1,13 @@
 import { describe, expect, it } from 'vitest';
 import { createRandom } from '../circuit/random.js';
-import { buildPlan, type Scenario } from '../plan/build-plan.js';
+import { buildPlan } from '../plan/build-plan.js';
+import type { Scenario } from '../plan/scenarios.js';
 import type { PostResult } from '../send/post-result.js';
 import type { Spool, SpooledPost } from '../send/spool.js';
 import { anAnswer, aPost } from '../testing/builders.js';
 import { createVirtualClock } from '../testing/virtual-clock.js';
 import type { ResultPost } from '../types/result-post.js';
+import { outageOf } from './outage.js';
 import { runSimulation } from './run-simulation.js';
 
 /** Judges by the station's verdict, as a hub would, and remembers what it took. */
@@ -44,13 +46,11 @@ async function run(
   spool: Spool = aSpool().spool,
 ) {
   const random = createRandom(options.seed ?? 42);
-  const planOptions = {
-    scenario: options.scenario ?? 'steady',
-    stations: 3,
-    madeAt: new Date('2026-11-26'),
-  } as const;
+  const { scenario = 'steady', count = 60 } = options;
+  const planOptions = { scenario, stations: 3, madeAt: new Date('2026-11-26') } as const;
+  const plan = buildPlan(planOptions, random);
   return runSimulation(
-    { plan: buildPlan(planOptions, random), stations: 3, testsPerSecond: 2, count: options.count ?? 60 },
+    { plan, stations: 3, testsPerSecond: 2, count, outage: outageOf(scenario, count) },
     {
       clock: createVirtualClock(options.start),
       send,
@@ -160,5 +160,40 @@ describe('a simulation', () => {
     const tally = await run({ scenario: 'one-fail', count: 100 }, hub.send);
     expect(tally).toMatchObject({ tested: 1, accepted: 1, verdicts: { fail: 1 } });
     expect(hub.taken).toHaveLength(1);
+  });
+
+  describe('with an outage', () => {
+    it('loses nothing: what waited arrives late, out of order, and units went on meanwhile', async () => {
+      const hub = aHub();
+      const { waiting, spool } = aSpool();
+      const tally = await run({ scenario: 'outage', count: 100 }, hub.send, spool);
+      expect(tally).toMatchObject({ tested: 100, accepted: 100, waiting: 0 });
+      expect(new Set(hub.taken.map((post) => post.resultId)).size).toBe(100);
+      expect(waiting.size).toBe(0);
+
+      const late = hub.taken.filter(
+        (post) => Date.parse(post.sentAt ?? '') - Date.parse(post.finishedAt ?? '') > 1000,
+      );
+      expect(late.length).toBeGreaterThan(30);
+      const starts = late.map((post) => post.startedAt);
+      expect(starts).not.toEqual([...starts].sort());
+      expect(late.some((post) => post.routedOn === 'station')).toBe(true);
+    });
+
+    it('leaves what still waits in the spool when it is stopped', async () => {
+      const stop = new AbortController();
+      const { waiting, spool } = aSpool();
+      const tested: SpooledPost[] = [];
+      const stopping: Spool = {
+        ...spool,
+        add: async (spooled) => {
+          await spool.add(spooled);
+          if (tested.push(spooled) === 30) stop.abort();
+        },
+      };
+      const tally = await run({ scenario: 'outage', count: 100, stop: stop.signal }, aHub().send, stopping);
+      expect(tally.waiting).toBe(10);
+      expect([...waiting.values()]).toEqual(tested.slice(-10));
+    });
   });
 });

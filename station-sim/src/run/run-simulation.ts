@@ -6,6 +6,7 @@ import type { Clock } from '../send/clock.js';
 import type { PostResult } from '../send/post-result.js';
 import type { Spool, SpooledPost } from '../send/spool.js';
 import { createStationLane, type StationLane } from '../send/station-lane.js';
+import { createHeldPosts, type Outage } from './outage.js';
 import { runTest, type DueTest } from './run-test.js';
 import { createWaitingRoom } from './waiting-room.js';
 
@@ -15,6 +16,8 @@ export interface SimulationOptions {
   testsPerSecond: number;
   /** How many tests to run; 0 goes on until stopped. */
   count: number;
+  /** When the network is away; null when it never is. */
+  outage: Outage | null;
 }
 
 export interface SimulationParts {
@@ -61,6 +64,15 @@ export async function runSimulation(options: SimulationOptions, parts: Simulatio
     underWay.add(sent);
   };
 
+  const held = createHeldPosts(options.outage, parts.random.fork('outage'));
+  const sendHeld = async () => {
+    for (const spooled of held.release(clock.now())) {
+      await spool.add(spooled);
+      tally.waiting--;
+      send(spooled, () => undefined);
+    }
+  };
+
   for (const leftOver of spool.leftOver) {
     tally.replayed++;
     send(leftOver, () => undefined);
@@ -68,13 +80,24 @@ export async function runSimulation(options: SimulationOptions, parts: Simulatio
   while (!stop.aborted && !tally.blocked && (options.count === 0 || tally.tested < options.count)) {
     const next = units.takeDue(clock.now()) ?? fromPlan(options.plan);
     if (next) {
-      const post = runTest(next, clock.now(), parts.random);
-      await spool.add({ station: next.test.station, post });
+      const post = runTest(next, options.stations, clock.now(), parts.random);
+      const spooled = { station: next.test.station, post };
+      const moveOn = units.moverOf(next, post, options.stations, clock);
+      await spool.add(spooled);
       tally.tested++;
-      send({ station: next.test.station, post }, units.moverOf(next, post, options.stations, clock));
+      if (held.isAway(tally.tested)) {
+        tally.waiting++;
+        held.hold(spooled);
+        moveOn(null);
+        onProgress(tally);
+      } else {
+        await sendHeld();
+        send(spooled, moveOn);
+      }
     } else if (units.isEmpty() && underWay.size === 0) break;
     await clock.wait(1000 / options.testsPerSecond, stop);
   }
+  if (!stop.aborted && !tally.blocked) await sendHeld();
   await settle(underWay, tally, parts, giveUp);
   return tally;
 }

@@ -3,6 +3,7 @@ import { productByPartNumber, stageOf } from '../circuit/products.js';
 import { simulateSweep, sweepMs } from '../circuit/simulate-sweep.js';
 import { benchFor, stationByName } from '../circuit/stations.js';
 import type { PlannedTest } from '../plan/build-plan.js';
+import { benchStateOf } from '../plan/scenarios.js';
 import type { ResultPost } from '../types/result-post.js';
 
 export interface DueTest {
@@ -16,12 +17,18 @@ export interface DueTest {
 /** A little more than the time a station takes to send after its last reading. */
 const SEND_MS = 250;
 
-/** Runs a test that ends now and gives the station's post. */
-export function runTest({ test, trial, routedOn }: DueTest, now: Date, random: RandomSource): ResultPost {
+/** Runs a test that ends now on one of so many stations and gives the station's post. */
+export function runTest(
+  { test, trial, routedOn }: DueTest,
+  stationCount: number,
+  now: Date,
+  random: RandomSource,
+): ResultPost {
   const product = productByPartNumber(test.unit.partNumber);
   const stage = stageOf(product, test.stage);
-  const own = random.fork(`test ${test.runKind} ${test.label} ${test.stage} ${trial}`);
-  const bench = benchFor(stationByName(test.station), product, { fixture: test.fixture });
+  const own = random.fork(`test ${test.runKind} ${test.number} ${test.stage} ${trial}`);
+  const trouble = benchStateOf({ ...test, stationCount }, product, own.fork('trouble'));
+  const bench = benchFor(stationByName(test.station), product, { fixture: test.fixture, ...trouble });
   const run = {
     product,
     stage,
