@@ -4,4509 +4,4474 @@
  */
 
 export interface paths {
-  '/api/v1/live': {
-    parameters: {
-      query?: never;
-      header?: never;
-      path?: never;
-      cookie?: never;
+    "/api/v1/live": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        /**
+         * Follow changes as they happen
+         * @description Server-sent events. Each event says what changed; an event named `ping` comes every 15 seconds. The stream ends when the session ends.
+         */
+        get: operations["Live_follow"];
+        put?: never;
+        post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
     };
-    /**
-     * Follow changes as they happen
-     * @description Server-sent events. Each event says what changed; an event named `ping` comes every 15 seconds. The stream ends when the session ends.
-     */
-    get: operations['Live_follow'];
-    put?: never;
-    post?: never;
-    delete?: never;
-    options?: never;
-    head?: never;
-    patch?: never;
-    trace?: never;
-  };
-  '/api/v1/audit': {
-    parameters: {
-      query?: never;
-      header?: never;
-      path?: never;
-      cookie?: never;
+    "/api/v1/audit": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        /** Read the audit trail, newest first */
+        get: operations["Audit_page"];
+        put?: never;
+        post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
     };
-    /** Read the audit trail, newest first */
-    get: operations['Audit_page'];
-    put?: never;
-    post?: never;
-    delete?: never;
-    options?: never;
-    head?: never;
-    patch?: never;
-    trace?: never;
-  };
-  '/api/v1/rights': {
-    parameters: {
-      query?: never;
-      header?: never;
-      path?: never;
-      cookie?: never;
+    "/api/v1/rights": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        /** Which role may do what */
+        get: operations["Rights_list"];
+        put?: never;
+        post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
     };
-    /** Which role may do what */
-    get: operations['Rights_list'];
-    put?: never;
-    post?: never;
-    delete?: never;
-    options?: never;
-    head?: never;
-    patch?: never;
-    trace?: never;
-  };
-  '/api/v1/session': {
-    parameters: {
-      query?: never;
-      header?: never;
-      path?: never;
-      cookie?: never;
+    "/api/v1/session": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        /** Who is signed in */
+        get: operations["Session_current"];
+        put?: never;
+        /**
+         * Sign in
+         * @description Sets the cookie `ampkeep_session` for 12 hours. Repeated failures bring growing pauses.
+         */
+        post: operations["Session_signIn"];
+        /** Sign out */
+        delete: operations["Session_signOut"];
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
     };
-    /** Who is signed in */
-    get: operations['Session_current'];
-    put?: never;
-    /**
-     * Sign in
-     * @description Sets the cookie `ampkeep_session` for 12 hours. Repeated failures bring growing pauses.
-     */
-    post: operations['Session_signIn'];
-    /** Sign out */
-    delete: operations['Session_signOut'];
-    options?: never;
-    head?: never;
-    patch?: never;
-    trace?: never;
-  };
-  '/api/v1/session/password': {
-    parameters: {
-      query?: never;
-      header?: never;
-      path?: never;
-      cookie?: never;
+    "/api/v1/session/password": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        /** Change the own password; ends the other sessions of the account */
+        post: operations["Session_changePassword"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
     };
-    get?: never;
-    put?: never;
-    /** Change the own password; ends the other sessions of the account */
-    post: operations['Session_changePassword'];
-    delete?: never;
-    options?: never;
-    head?: never;
-    patch?: never;
-    trace?: never;
-  };
-  '/api/v1/users': {
-    parameters: {
-      query?: never;
-      header?: never;
-      path?: never;
-      cookie?: never;
+    "/api/v1/users": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        /** List the accounts, by name */
+        get: operations["Users_list"];
+        put?: never;
+        /** Create an account */
+        post: operations["Users_create"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
     };
-    /** List the accounts, by name */
-    get: operations['Users_list'];
-    put?: never;
-    /** Create an account */
-    post: operations['Users_create'];
-    delete?: never;
-    options?: never;
-    head?: never;
-    patch?: never;
-    trace?: never;
-  };
-  '/api/v1/users/{userId}': {
-    parameters: {
-      query?: never;
-      header?: never;
-      path?: never;
-      cookie?: never;
+    "/api/v1/users/{userId}": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        /**
+         * Change an account's name, role or password, disable or enable it
+         * @description Acts on the next request of whoever is signed in with it. The last administrator stays one.
+         */
+        patch: operations["Users_update"];
+        trace?: never;
     };
-    get?: never;
-    put?: never;
-    post?: never;
-    delete?: never;
-    options?: never;
-    head?: never;
-    /**
-     * Change an account's name, role or password, disable or enable it
-     * @description Acts on the next request of whoever is signed in with it. The last administrator stays one.
-     */
-    patch: operations['Users_update'];
-    trace?: never;
-  };
-  '/api/v1/products': {
-    parameters: {
-      query?: never;
-      header?: never;
-      path?: never;
-      cookie?: never;
+    "/api/v1/products": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        /** Products with their stages, and the test plans and limits in force */
+        get: operations["Products_list"];
+        put?: never;
+        post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
     };
-    /** Products with their stages, and the test plans and limits in force */
-    get: operations['Products_list'];
-    put?: never;
-    post?: never;
-    delete?: never;
-    options?: never;
-    head?: never;
-    patch?: never;
-    trace?: never;
-  };
-  '/api/v1/stations': {
-    parameters: {
-      query?: never;
-      header?: never;
-      path?: never;
-      cookie?: never;
+    "/api/v1/stations": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        /** All stations with their state and instruments */
+        get: operations["Stations_list"];
+        put?: never;
+        /** Add a station */
+        post: operations["Stations_create"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
     };
-    /** All stations with their state and instruments */
-    get: operations['Stations_list'];
-    put?: never;
-    /** Add a station */
-    post: operations['Stations_create'];
-    delete?: never;
-    options?: never;
-    head?: never;
-    patch?: never;
-    trace?: never;
-  };
-  '/api/v1/test-plans/current': {
-    parameters: {
-      query?: never;
-      header?: never;
-      path?: never;
-      cookie?: never;
+    "/api/v1/test-plans/current": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        /** Load steps and limits in force now, and when a golden check is due */
+        get: operations["TestPlans_current"];
+        put?: never;
+        post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
     };
-    /** Load steps and limits in force now, and when a golden check is due */
-    get: operations['TestPlans_current'];
-    put?: never;
-    post?: never;
-    delete?: never;
-    options?: never;
-    head?: never;
-    patch?: never;
-    trace?: never;
-  };
-  '/api/v1/heartbeats': {
-    parameters: {
-      query?: never;
-      header?: never;
-      path?: never;
-      cookie?: never;
+    "/api/v1/heartbeats": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        /** Say that the station lives; the answer is the server's time */
+        post: operations["Heartbeats_beat"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
     };
-    get?: never;
-    put?: never;
-    /** Say that the station lives; the answer is the server's time */
-    post: operations['Heartbeats_beat'];
-    delete?: never;
-    options?: never;
-    head?: never;
-    patch?: never;
-    trace?: never;
-  };
-  '/api/v1/stations/{station}/keys': {
-    parameters: {
-      query?: never;
-      header?: never;
-      path?: never;
-      cookie?: never;
+    "/api/v1/stations/{station}/keys": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        /** List a station's API keys, newest first */
+        get: operations["ApiKeys_list"];
+        put?: never;
+        /** Make an API key for a station; the answer is the only place that shows it */
+        post: operations["ApiKeys_create"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
     };
-    /** List a station's API keys, newest first */
-    get: operations['ApiKeys_list'];
-    put?: never;
-    /** Make an API key for a station; the answer is the only place that shows it */
-    post: operations['ApiKeys_create'];
-    delete?: never;
-    options?: never;
-    head?: never;
-    patch?: never;
-    trace?: never;
-  };
-  '/api/v1/stations/{station}/keys/{keyId}/revoke': {
-    parameters: {
-      query?: never;
-      header?: never;
-      path?: never;
-      cookie?: never;
+    "/api/v1/stations/{station}/keys/{keyId}/revoke": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        /** Revoke an API key; the next post with it is refused */
+        post: operations["ApiKeys_revoke"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
     };
-    get?: never;
-    put?: never;
-    /** Revoke an API key; the next post with it is refused */
-    post: operations['ApiKeys_revoke'];
-    delete?: never;
-    options?: never;
-    head?: never;
-    patch?: never;
-    trace?: never;
-  };
-  '/api/v1/mailbox': {
-    parameters: {
-      query?: never;
-      header?: never;
-      path?: never;
-      cookie?: never;
+    "/api/v1/mailbox": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        /** List the mails of the local mailbox; exists only with the local mail transport */
+        get: operations["LocalMailbox_list"];
+        put?: never;
+        post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
     };
-    /** List the mails of the local mailbox; exists only with the local mail transport */
-    get: operations['LocalMailbox_list'];
-    put?: never;
-    post?: never;
-    delete?: never;
-    options?: never;
-    head?: never;
-    patch?: never;
-    trace?: never;
-  };
-  '/api/v1/mailbox/{mailId}': {
-    parameters: {
-      query?: never;
-      header?: never;
-      path?: never;
-      cookie?: never;
+    "/api/v1/mailbox/{mailId}": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        /** Read a mail of the local mailbox */
+        get: operations["LocalMailbox_find"];
+        put?: never;
+        post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
     };
-    /** Read a mail of the local mailbox */
-    get: operations['LocalMailbox_find'];
-    put?: never;
-    post?: never;
-    delete?: never;
-    options?: never;
-    head?: never;
-    patch?: never;
-    trace?: never;
-  };
-  '/api/v1/breaches': {
-    parameters: {
-      query?: never;
-      header?: never;
-      path?: never;
-      cookie?: never;
+    "/api/v1/breaches": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        /** List breaches, newest opened first */
+        get: operations["Breaches_list"];
+        put?: never;
+        post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
     };
-    /** List breaches, newest opened first */
-    get: operations['Breaches_list'];
-    put?: never;
-    post?: never;
-    delete?: never;
-    options?: never;
-    head?: never;
-    patch?: never;
-    trace?: never;
-  };
-  '/api/v1/breaches/{breachId}': {
-    parameters: {
-      query?: never;
-      header?: never;
-      path?: never;
-      cookie?: never;
+    "/api/v1/breaches/{breachId}": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        /** Read a breach with its results and mails */
+        get: operations["Breaches_detail"];
+        put?: never;
+        post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
     };
-    /** Read a breach with its results and mails */
-    get: operations['Breaches_detail'];
-    put?: never;
-    post?: never;
-    delete?: never;
-    options?: never;
-    head?: never;
-    patch?: never;
-    trace?: never;
-  };
-  '/api/v1/breaches/{breachId}/acknowledge': {
-    parameters: {
-      query?: never;
-      header?: never;
-      path?: never;
-      cookie?: never;
+    "/api/v1/breaches/{breachId}/acknowledge": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        /** Say that you take care of an open breach */
+        post: operations["Breaches_acknowledge"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
     };
-    get?: never;
-    put?: never;
-    /** Say that you take care of an open breach */
-    post: operations['Breaches_acknowledge'];
-    delete?: never;
-    options?: never;
-    head?: never;
-    patch?: never;
-    trace?: never;
-  };
-  '/api/v1/breaches/{breachId}/close': {
-    parameters: {
-      query?: never;
-      header?: never;
-      path?: never;
-      cookie?: never;
+    "/api/v1/breaches/{breachId}/close": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        /** Close a breach with its cause and what was done; a later fail opens a new one */
+        post: operations["Breaches_close"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
     };
-    get?: never;
-    put?: never;
-    /** Close a breach with its cause and what was done; a later fail opens a new one */
-    post: operations['Breaches_close'];
-    delete?: never;
-    options?: never;
-    head?: never;
-    patch?: never;
-    trace?: never;
-  };
-  '/api/v1/intake': {
-    parameters: {
-      query?: never;
-      header?: never;
-      path?: never;
-      cookie?: never;
+    "/api/v1/intake": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        /** Everything that came in, accepted or refused, newest first */
+        get: operations["Intake_list"];
+        put?: never;
+        post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
     };
-    /** Everything that came in, accepted or refused, newest first */
-    get: operations['Intake_list'];
-    put?: never;
-    post?: never;
-    delete?: never;
-    options?: never;
-    head?: never;
-    patch?: never;
-    trace?: never;
-  };
-  '/api/v1/intake/refused/{intakeId}': {
-    parameters: {
-      query?: never;
-      header?: never;
-      path?: never;
-      cookie?: never;
+    "/api/v1/intake/refused/{intakeId}": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        /** A refused post with its reasons and its body as received */
+        get: operations["Intake_refused"];
+        put?: never;
+        post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
     };
-    /** A refused post with its reasons and its body as received */
-    get: operations['Intake_refused'];
-    put?: never;
-    post?: never;
-    delete?: never;
-    options?: never;
-    head?: never;
-    patch?: never;
-    trace?: never;
-  };
-  '/api/v1/results': {
-    parameters: {
-      query?: never;
-      header?: never;
-      path?: never;
-      cookie?: never;
+    "/api/v1/results": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        /** List results, newest arrival first */
+        get: operations["Results_list"];
+        put?: never;
+        /**
+         * Post a load-regulation result
+         * @description 201: stored, on disk. 200: the same resultId with the same content was stored before, this is its answer. A retry is harmless; keep a result until you got 2xx or a 4xx other than 429.
+         */
+        post: operations["Results_record"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
     };
-    /** List results, newest arrival first */
-    get: operations['Results_list'];
-    put?: never;
-    /**
-     * Post a load-regulation result
-     * @description 201: stored, on disk. 200: the same resultId with the same content was stored before, this is its answer. A retry is harmless; keep a result until you got 2xx or a 4xx other than 429.
-     */
-    post: operations['Results_record'];
-    delete?: never;
-    options?: never;
-    head?: never;
-    patch?: never;
-    trace?: never;
-  };
-  '/api/v1/results/{resultId}': {
-    parameters: {
-      query?: never;
-      header?: never;
-      path?: never;
-      cookie?: never;
+    "/api/v1/results/{resultId}": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        /** One result with its sweep and judging; a station key reads its own */
+        get: operations["Results_detail"];
+        put?: never;
+        post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
     };
-    /** One result with its sweep and judging; a station key reads its own */
-    get: operations['Results_detail'];
-    put?: never;
-    post?: never;
-    delete?: never;
-    options?: never;
-    head?: never;
-    patch?: never;
-    trace?: never;
-  };
-  '/api/v1/results/{resultId}/post': {
-    parameters: {
-      query?: never;
-      header?: never;
-      path?: never;
-      cookie?: never;
+    "/api/v1/results/{resultId}/post": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        /** The post exactly as it was received */
+        get: operations["Results_rawPost"];
+        put?: never;
+        post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
     };
-    /** The post exactly as it was received */
-    get: operations['Results_rawPost'];
-    put?: never;
-    post?: never;
-    delete?: never;
-    options?: never;
-    head?: never;
-    patch?: never;
-    trace?: never;
-  };
-  '/api/v1/units': {
-    parameters: {
-      query?: never;
-      header?: never;
-      path?: never;
-      cookie?: never;
+    "/api/v1/units": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        /** List units by their latest result, the newest first */
+        get: operations["Units_list"];
+        put?: never;
+        post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
     };
-    /** List units by their latest result, the newest first */
-    get: operations['Units_list'];
-    put?: never;
-    post?: never;
-    delete?: never;
-    options?: never;
-    head?: never;
-    patch?: never;
-    trace?: never;
-  };
-  '/api/v1/units/{partNumber}/{serialNumber}': {
-    parameters: {
-      query?: never;
-      header?: never;
-      path?: never;
-      cookie?: never;
+    "/api/v1/units/{partNumber}/{serialNumber}": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        /** A unit's whole history, stage by stage */
+        get: operations["Units_one"];
+        put?: never;
+        post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
     };
-    /** A unit's whole history, stage by stage */
-    get: operations['Units_one'];
-    put?: never;
-    post?: never;
-    delete?: never;
-    options?: never;
-    head?: never;
-    patch?: never;
-    trace?: never;
-  };
-  '/api/v1/units/{partNumber}/{serialNumber}/route': {
-    parameters: {
-      query?: never;
-      header?: never;
-      path?: never;
-      cookie?: never;
+    "/api/v1/units/{partNumber}/{serialNumber}/route": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        /** May this unit be tested at this stage now? For stations */
+        get: operations["Units_route"];
+        put?: never;
+        post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
     };
-    /** May this unit be tested at this stage now? For stations */
-    get: operations['Units_route'];
-    put?: never;
-    post?: never;
-    delete?: never;
-    options?: never;
-    head?: never;
-    patch?: never;
-    trace?: never;
-  };
-  '/api/v1/today': {
-    parameters: {
-      query?: never;
-      header?: never;
-      path?: never;
-      cookie?: never;
+    "/api/v1/today": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        /** The line today: yields, what is getting worse, open breaches, the run of units */
+        get: operations["Today_today"];
+        put?: never;
+        post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
     };
-    /** The line today: yields, what is getting worse, open breaches, the run of units */
-    get: operations['Today_today'];
-    put?: never;
-    post?: never;
-    delete?: never;
-    options?: never;
-    head?: never;
-    patch?: never;
-    trace?: never;
-  };
-  '/api/v1/yields': {
-    parameters: {
-      query?: never;
-      header?: never;
-      path?: never;
-      cookie?: never;
+    "/api/v1/yields": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        /** Yields over a period: trend, splits, failing measures, retests, aborts, what changed */
+        get: operations["Yield_report"];
+        put?: never;
+        post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
     };
-    /** Yields over a period: trend, splits, failing measures, retests, aborts, what changed */
-    get: operations['Yield_report'];
-    put?: never;
-    post?: never;
-    delete?: never;
-    options?: never;
-    head?: never;
-    patch?: never;
-    trace?: never;
-  };
-  '/api/v1/proof': {
-    parameters: {
-      query?: never;
-      header?: never;
-      path?: never;
-      cookie?: never;
+    "/api/v1/proof": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        /** Published cases recomputed on the spot by this installation, beside their sources */
+        get: operations["Proof_prove"];
+        put?: never;
+        post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
     };
-    /** Published cases recomputed on the spot by this installation, beside their sources */
-    get: operations['Proof_prove'];
-    put?: never;
-    post?: never;
-    delete?: never;
-    options?: never;
-    head?: never;
-    patch?: never;
-    trace?: never;
-  };
-  '/api/v1/site': {
-    parameters: {
-      query?: never;
-      header?: never;
-      path?: never;
-      cookie?: never;
+    "/api/v1/site": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        /** Name and kind of this installation */
+        get: operations["Site_site"];
+        put?: never;
+        post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
     };
-    /** Name and kind of this installation */
-    get: operations['Site_site'];
-    put?: never;
-    post?: never;
-    delete?: never;
-    options?: never;
-    head?: never;
-    patch?: never;
-    trace?: never;
-  };
-  '/api/v1/health': {
-    parameters: {
-      query?: never;
-      header?: never;
-      path?: never;
-      cookie?: never;
+    "/api/v1/health": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        /** Answers 200 while the database can be read */
+        get: operations["Site_health"];
+        put?: never;
+        post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
     };
-    /** Answers 200 while the database can be read */
-    get: operations['Site_health'];
-    put?: never;
-    post?: never;
-    delete?: never;
-    options?: never;
-    head?: never;
-    patch?: never;
-    trace?: never;
-  };
 }
 export type webhooks = Record<string, never>;
 export interface components {
-  schemas: {
-    AbortsDto: {
-      aborted: number;
-      /** @description All production runs, aborted ones included. */
-      total: number;
-    };
-    AcknowledgeBreachDto: {
-      /**
-       * @description What you know and what you do next.
-       * @example Lot L2648-2 on hold, checking the transistor pairs.
-       */
-      note: string;
-    };
-    AnsweredMeasureDto: {
-      /** @example outputImpedance */
-      name: string;
-      value: number | null;
-      /** @example Ω */
-      unit: string;
-      /** @description Half width of the 95 % interval; null where it has no meaning, as for a bound. */
-      expandedUncertainty: number | null;
-      low: number | null;
-      high: number | null;
-      /** @enum {string} */
-      bound: 'atLeast' | 'atMost' | 'exact';
-      limit: components['schemas']['LimitInForceDto'] | null;
-      /**
-       * @description Null when nothing limits this measure.
-       * @enum {string|null}
-       */
-      outcome: 'fail' | 'notProven' | 'pass' | null;
-      probabilityOfConformity: number | null;
-      /** @description Why there is no value. */
-      reason: string | null;
-    };
-    ApiKeyDto: {
-      /** @example 3 */
-      keyId: number;
-      /**
-       * @description The public part, by which the key can be told.
-       * @example k7m2p9qx
-       */
-      prefix: string;
-      label: string;
-      practice: boolean;
-      /** @enum {string} */
-      state: 'active' | 'expired' | 'revoked';
-      createdAt: string;
-      createdBy: string;
-      expiresAt: string | null;
-      revokedAt: string | null;
-      lastUsedAt: string | null;
-    };
-    AuditEntryDto: {
-      /** @example 118 */
-      auditId: number;
-      /** @example 2026-11-30T08:21:04.500Z */
-      at: string;
-      /**
-       * @description Mail address of the person, or `system`.
-       * @example rosalind.hart@fernhollow.example
-       */
-      actor: string;
-      /** @example apiKey.revoked */
-      action: string;
-      /** @example north-1 k7m2p9qx */
-      subject: string;
-      /** @example key found on a shared drive */
-      detail: string | null;
-    };
-    AuditPageDto: {
-      items: components['schemas']['AuditEntryDto'][];
-      /**
-       * @description Send it as `cursor` for the next page; null at the end.
-       * @example 69
-       */
-      nextCursor: string | null;
-    };
-    BreachDetailDto: {
-      /**
-       * @description The measure whose limit was broken, or `stoppedOnFail`.
-       * @example outputImpedance
-       * @enum {string}
-       */
-      measure:
-        | 'complianceVoltage'
-        | 'effectiveEarlyVoltage'
-        | 'impedanceCurrentProduct'
-        | 'linearityError'
-        | 'loadRegulation'
-        | 'outputImpedance'
-        | 'referenceCurrent'
-        | 'relativeSlope'
-        | 'setpointError'
-        | 'settlingDrift'
-        | 'stoppedOnFail'
-        | 'sweepHysteresis';
-      /** @enum {string} */
-      state: 'acknowledged' | 'closed' | 'open';
-      /** @example 12 */
-      breachId: number;
-      /** @example Output impedance out of limits: FH-R500-W at final */
-      title: string;
-      /** @example FH-R500-W */
-      partNumber: string;
-      /** @example final */
-      stage: string;
-      openedAt: string;
-      lastEventAt: string;
-      /** @description Results that belong to it. */
-      eventCount: number;
-      acknowledgedAt: string | null;
-      /** @description Mail address of the person. */
-      acknowledgedBy: string | null;
-      note: string | null;
-      closedAt: string | null;
-      /** @description Mail address of the person. */
-      closedBy: string | null;
-      cause: string | null;
-      /** @description What was done so that it doesn't return. */
-      action: string | null;
-      /** @description The result that joined it last. */
-      latest: components['schemas']['RunItemDto'] | null;
-      /** @description Newest first, up to 50. */
-      events: components['schemas']['BreachEventDto'][];
-      /** @description Newest first. */
-      mails: components['schemas']['OutboxMailDto'][];
-    };
-    BreachDto: {
-      /**
-       * @description The measure whose limit was broken, or `stoppedOnFail`.
-       * @example outputImpedance
-       * @enum {string}
-       */
-      measure:
-        | 'complianceVoltage'
-        | 'effectiveEarlyVoltage'
-        | 'impedanceCurrentProduct'
-        | 'linearityError'
-        | 'loadRegulation'
-        | 'outputImpedance'
-        | 'referenceCurrent'
-        | 'relativeSlope'
-        | 'setpointError'
-        | 'settlingDrift'
-        | 'stoppedOnFail'
-        | 'sweepHysteresis';
-      /** @enum {string} */
-      state: 'acknowledged' | 'closed' | 'open';
-      /** @example 12 */
-      breachId: number;
-      /** @example Output impedance out of limits: FH-R500-W at final */
-      title: string;
-      /** @example FH-R500-W */
-      partNumber: string;
-      /** @example final */
-      stage: string;
-      openedAt: string;
-      lastEventAt: string;
-      /** @description Results that belong to it. */
-      eventCount: number;
-      acknowledgedAt: string | null;
-      /** @description Mail address of the person. */
-      acknowledgedBy: string | null;
-      note: string | null;
-      closedAt: string | null;
-      /** @description Mail address of the person. */
-      closedBy: string | null;
-      cause: string | null;
-      /** @description What was done so that it doesn't return. */
-      action: string | null;
-      /** @description The result that joined it last. */
-      latest: components['schemas']['RunItemDto'] | null;
-    };
-    BreachEventDto: {
-      at: string;
-      /**
-       * @description The judging in words.
-       * @example Output impedance is 3.1 MΩ (3.0 to 3.2 MΩ); at least 5 MΩ is required, so it fails.
-       */
-      text: string;
-      run: components['schemas']['RunItemDto'];
-    };
-    BreachPageDto: {
-      /** @description Newest opened first. */
-      items: components['schemas']['BreachDto'][];
-      /** @description Give it back as `cursor` for older ones; null at the end. */
-      nextCursor: string | null;
-    };
-    ChangePasswordDto: {
-      /** @example correct horse battery */
-      currentPassword: string;
-      /**
-       * @description At least 12 characters, at most 72 bytes.
-       * @example three blue resistors
-       */
-      newPassword: string;
-    };
-    CloseBreachDto: {
-      /**
-       * @description Why it happened.
-       * @example A reel of transistors with a low Early voltage.
-       */
-      cause: string;
-      /**
-       * @description What was done so that it doesn't return.
-       * @example Reel returned, incoming check of the Early voltage added.
-       */
-      action: string;
-    };
-    CodedTextDto: {
-      /** @example goldenDue */
-      code: string;
-      text: string;
-    };
-    CohortDto: {
-      firstPass: components['schemas']['YieldDto'];
-      final: components['schemas']['YieldDto'];
-      /** @description Units whose first attempt failed. */
-      failed: number;
-      /** @description Units whose first attempt could not be told. */
-      notProven: number;
-      /** @description Units that have not passed yet and may be tested again. */
-      openUnits: number;
-    };
-    CreateApiKeyDto: {
-      /**
-       * @description What tells this key from the station's others.
-       * @example rack PC, bay 2
-       */
-      label: string;
-      /** @description A practice key's results are judged and shown, never counted. */
-      practice: boolean;
-      /**
-       * @description When it stops working, RFC 3339 with zone; null for never.
-       * @example 2027-12-01T00:00:00.000Z
-       */
-      expiresAt?: string | null;
-    };
-    CreateStationDto: {
-      /**
-       * @description Short name; never changes.
-       * @example south-3
-       */
-      station: string;
-      /** @example south */
-      line: string;
-    };
-    CreateUserDto: {
-      /** @example integrator */
-      role: components['schemas']['Role'];
-      /** @example tomasz.reed@fernhollow.example */
-      email: string;
-      /** @example Tomasz Reed */
-      displayName: string;
-      /**
-       * @description The first password, to be changed by its owner. At least 12 characters, at most 72 bytes.
-       * @example three blue resistors
-       */
-      password: string;
-    };
-    CreatedApiKeyDto: {
-      /** @example 3 */
-      keyId: number;
-      /**
-       * @description The public part, by which the key can be told.
-       * @example k7m2p9qx
-       */
-      prefix: string;
-      label: string;
-      practice: boolean;
-      /** @enum {string} */
-      state: 'active' | 'expired' | 'revoked';
-      createdAt: string;
-      createdBy: string;
-      expiresAt: string | null;
-      revokedAt: string | null;
-      lastUsedAt: string | null;
-      /**
-       * @description The whole key. It is shown this once and kept nowhere.
-       * @example amk_k7m2p9qx_6tR0…
-       */
-      key: string;
-    };
-    CurrentPlanDto: {
-      partNumber: string;
-      stage: string;
-      nominalAmps: number;
-      supplyVolts: number;
-      complianceLowVolts: number;
-      complianceHighVolts: number;
-      maxAttempts: number;
-      /** @description Safety caution of the product, if it needs one. */
-      caution: string | null;
-      testPlan: components['schemas']['TestPlanDto'] | null;
-      limitSet: components['schemas']['LimitSetDto'] | null;
-      /** @description Any of these proves the station. */
-      goldenSerialNumbers: string[];
-      /** @description Until when this station shall have measured a golden unit; the past when it is owed; null when none is asked for. */
-      goldenCheckDueAt: string | null;
-    };
-    DemoAccountDto: {
-      email: string;
-      password: string;
-      displayName: string;
-      /** @enum {string} */
-      role: 'administrator' | 'integrator' | 'productionEngineer' | 'qualityLead' | 'viewer';
-    };
-    FailingMeasureDto: {
-      measure: string;
-      label: string;
-      /** @description First attempts that failed it. */
-      units: number;
-      /** @description Share of all named failures up to and including this one. */
-      cumulativeShare: number;
-    };
-    HealthDto: {
-      status: string;
-      version: string;
-    };
-    HeartbeatDto: {
-      /** @description Set the station's clock by it. */
-      serverTime: string;
-      /** @description Server minus station; null without sentAt. */
-      clockSkewSeconds: number | null;
-    };
-    InstrumentDto: {
-      /** @enum {string} */
-      kind: 'ammeter' | 'voltmeter';
-      serialNumber: string;
-      model: string | null;
-      /** @description A or V, by kind. */
-      resolution: number | null;
-      readingAccuracyPercent: number | null;
-      rangeAccuracyPercent: number | null;
-      /** @example 2027-03-31 */
-      calibrationDueOn: string | null;
-      calibrationOverdue: boolean;
-    };
-    IntakeItemDto: {
-      /**
-       * @description Names the entry: `r…` accepted, `x…` refused.
-       * @example x12
-       */
-      intakeId: string;
-      /** @enum {string} */
-      kind: 'accepted' | 'refused';
-      receivedAt: string;
-      /** @description Of the newest time that the very same post came. */
-      lastReceivedAt: string;
-      /** @description How often it came. */
-      count: number;
-      station: string;
-      /** @description HTTP status that it was answered with. */
-      status: number;
-      resultId: string | null;
-      partNumber: string | null;
-      serialNumber: string | null;
-      /** @enum {string|null} */
-      verdict: 'aborted' | 'fail' | 'notProven' | 'pass' | 'unjudged' | null;
-      /** @description Why it was refused, place by place. */
-      errors: components['schemas']['ProblemErrorDto'][];
-    };
-    IntakePageDto: {
-      items: components['schemas']['IntakeItemDto'][];
-      nextCursor: string | null;
-    };
-    JudgedMeasureDto: {
-      /** @example outputImpedance */
-      name: string;
-      value: number | null;
-      /** @example Ω */
-      unit: string;
-      /** @description Half width of the 95 % interval; null where it has no meaning, as for a bound. */
-      expandedUncertainty: number | null;
-      low: number | null;
-      high: number | null;
-      /** @enum {string} */
-      bound: 'atLeast' | 'atMost' | 'exact';
-      limit: components['schemas']['LimitInForceDto'] | null;
-      /**
-       * @description Null when nothing limits this measure.
-       * @enum {string|null}
-       */
-      outcome: 'fail' | 'notProven' | 'pass' | null;
-      probabilityOfConformity: number | null;
-      /** @description Why there is no value. */
-      reason: string | null;
-      /** @example Output impedance */
-      label: string;
-      /** @description The judging in words. */
-      sentence: string;
-    };
-    LimitInForceDto: {
-      lower: number | null;
-      upper: number | null;
-      /** @enum {string} */
-      rule: 'guarded' | 'simple';
-      /** @description Guard band w = guardFactor · U. */
-      guardFactor: number;
-    };
-    LimitSetDto: {
-      version: number;
-      releasedAt: string;
-      effectiveAt: string;
-      releasedBy: string;
-      limits: components['schemas']['MeasureLimitDto'][];
-    };
-    LiveEventDto: {
-      topic: components['schemas']['LiveTopic'];
-      /** @description What changed, where one thing can be named. */
-      id: string | null;
-    };
-    /** @enum {string} */
-    LiveTopic: 'breaches' | 'intake' | 'mailbox' | 'results' | 'stations';
-    MailboxItemDto: {
-      /** @example 1796025342010-9f86d081884c */
-      mailId: string;
-      to: string[];
-      from: string;
-      subject: string;
-      receivedAt: string;
-      messageId: string;
-    };
-    MailboxMailDto: {
-      /** @example 1796025342010-9f86d081884c */
-      mailId: string;
-      to: string[];
-      from: string;
-      subject: string;
-      receivedAt: string;
-      messageId: string;
-      text: string;
-      /** @description As text: show it in a sandboxed frame only. */
-      html: string | null;
-    };
-    MailboxPageDto: {
-      /** @description Everyone who got a mail, whatever the filter. */
-      addresses: string[];
-      /** @description Newest first. */
-      items: components['schemas']['MailboxItemDto'][];
-    };
-    MeasureLimitDto: {
-      /** @enum {string} */
-      measure:
-        | 'complianceVoltage'
-        | 'effectiveEarlyVoltage'
-        | 'impedanceCurrentProduct'
-        | 'linearityError'
-        | 'loadRegulation'
-        | 'outputImpedance'
-        | 'referenceCurrent'
-        | 'relativeSlope'
-        | 'setpointError'
-        | 'settlingDrift'
-        | 'sweepHysteresis';
-      lower: number | null;
-      upper: number | null;
-      /** @enum {string} */
-      rule: 'guarded' | 'simple';
-      guardFactor: number;
-      /** @description Largest risk, 0 to 1, that the guard band leaves of passing a unit that lies just outside a limit. */
-      guardedRisk: number;
-    };
-    OutboxMailDto: {
-      /** @enum {string} */
-      state: 'failed' | 'sent' | 'waiting';
-      mailId: number;
-      /** @example quality@fernhollow.example */
-      to: string;
-      subject: string;
-      /** @description Times it was handed to the mail server. */
-      attempts: number;
-      createdAt: string;
-      sentAt: string | null;
-      /** @description What the mail server said to the last try. */
-      lastError: string | null;
-    };
-    PostHeartbeatDto: {
-      /**
-       * @description The station's own clock; shows how far it is off.
-       * @example 2026-11-30T08:15:42.010Z
-       */
-      sentAt?: string;
-    };
-    PostedCelsius: number;
-    PostedName: string;
-    PostedPercent: number;
-    PostedPositive: number;
-    /** @description As the instrument gave it; an overload code such as 9.9e37 is taken as overload. */
-    PostedReading: number;
-    /**
-     * Load-regulation result, station contract version 1
-     * @description One posted sweep with its conditions. Every name carries its unit. An unknown property is refused, so that a misspelt name can't vanish; what has no place here goes into `extra`.
-     */
-    PostedResult: {
-      /**
-       * Format: uuid
-       * @description Named by the station; makes a retry harmless.
-       */
-      resultId: string;
-      /**
-       * @description Only production counts in the yields.
-       * @default production
-       * @enum {string}
-       */
-      runKind?: 'production' | 'golden' | 'study' | 'practice';
-      /**
-       * @description What the station says of the run; `aborted` wants an abortReason and counts as no attempt.
-       * @enum {string}
-       */
-      outcome: 'completed' | 'stoppedOnFail' | 'aborted';
-      abortReason?: components['schemas']['PostedText'];
-      /** @description Place in a gauge study; required when runKind is `study`. */
-      study?: {
-        id: components['schemas']['PostedName'];
-        trial: number;
-        appraiser?: components['schemas']['PostedName'];
-        part?: components['schemas']['PostedName'];
-      };
-      partNumber: components['schemas']['PostedName'];
-      serialNumber: components['schemas']['PostedName'];
-      lot?: components['schemas']['PostedName'];
-      stage: components['schemas']['PostedName'];
-      channel?: components['schemas']['PostedName'];
-      startedAt: components['schemas']['PostedTime'];
-      finishedAt?: components['schemas']['PostedTime'];
-      /** @description The station's clock when it sent this; shows clock skew. */
-      sentAt?: components['schemas']['PostedTime'];
-      testPlanVersion?: number;
-      program?: {
-        name: components['schemas']['PostedName'];
-        version?: components['schemas']['PostedName'];
-      };
-      /** @description A badge code, never a person's name. */
-      operator?: components['schemas']['PostedName'];
-      fixture?: components['schemas']['PostedName'];
-      ambientCelsius?: components['schemas']['PostedCelsius'];
-      unitCelsius?: components['schemas']['PostedCelsius'];
-      humidityPercent?: number;
-      dwellMs?: number;
-      warmUpSeconds?: number;
-      supplyVolts?: components['schemas']['PostedReading'];
-      load?: {
+    schemas: {
+        AbortsDto: {
+            aborted: number;
+            /** @description All production runs, aborted ones included. */
+            total: number;
+        };
+        AcknowledgeBreachDto: {
+            /**
+             * @description What you know and what you do next.
+             * @example Lot L2648-2 on hold, checking the transistor pairs.
+             */
+            note: string;
+        };
+        AnsweredMeasureDto: {
+            /** @example outputImpedance */
+            name: string;
+            value: number | null;
+            /** @example Ω */
+            unit: string;
+            /** @description Half width of the 95 % interval; null where it has no meaning, as for a bound. */
+            expandedUncertainty: number | null;
+            low: number | null;
+            high: number | null;
+            /** @enum {string} */
+            bound: "atLeast" | "atMost" | "exact";
+            limit: components["schemas"]["LimitInForceDto"] | null;
+            /**
+             * @description Null when nothing limits this measure.
+             * @enum {string|null}
+             */
+            outcome: "fail" | "notProven" | "pass" | null;
+            probabilityOfConformity: number | null;
+            /** @description Why there is no value. */
+            reason: string | null;
+        };
+        ApiKeyDto: {
+            /** @example 3 */
+            keyId: number;
+            /**
+             * @description The public part, by which the key can be told.
+             * @example k7m2p9qx
+             */
+            prefix: string;
+            label: string;
+            practice: boolean;
+            /** @enum {string} */
+            state: "active" | "expired" | "revoked";
+            createdAt: string;
+            createdBy: string;
+            expiresAt: string | null;
+            revokedAt: string | null;
+            lastUsedAt: string | null;
+        };
+        AuditEntryDto: {
+            /** @example 118 */
+            auditId: number;
+            /** @example 2026-11-30T08:21:04.500Z */
+            at: string;
+            /**
+             * @description Mail address of the person, or `system`.
+             * @example rosalind.hart@fernhollow.example
+             */
+            actor: string;
+            /** @example apiKey.revoked */
+            action: string;
+            /** @example north-1 k7m2p9qx */
+            subject: string;
+            /** @example key found on a shared drive */
+            detail: string | null;
+        };
+        AuditPageDto: {
+            items: components["schemas"]["AuditEntryDto"][];
+            /**
+             * @description Send it as `cursor` for the next page; null at the end.
+             * @example 69
+             */
+            nextCursor: string | null;
+        };
+        BreachDetailDto: {
+            /**
+             * @description The measure whose limit was broken, or `stoppedOnFail`.
+             * @example outputImpedance
+             * @enum {string}
+             */
+            measure: "complianceVoltage" | "effectiveEarlyVoltage" | "impedanceCurrentProduct" | "linearityError" | "loadRegulation" | "outputImpedance" | "referenceCurrent" | "relativeSlope" | "setpointError" | "settlingDrift" | "stoppedOnFail" | "sweepHysteresis";
+            /** @enum {string} */
+            state: "acknowledged" | "closed" | "open";
+            /** @example 12 */
+            breachId: number;
+            /** @example Output impedance out of limits: FH-R500-W at final */
+            title: string;
+            /** @example FH-R500-W */
+            partNumber: string;
+            /** @example final */
+            stage: string;
+            openedAt: string;
+            lastEventAt: string;
+            /** @description Results that belong to it. */
+            eventCount: number;
+            acknowledgedAt: string | null;
+            /** @description Mail address of the person. */
+            acknowledgedBy: string | null;
+            note: string | null;
+            closedAt: string | null;
+            /** @description Mail address of the person. */
+            closedBy: string | null;
+            cause: string | null;
+            /** @description What was done so that it doesn't return. */
+            action: string | null;
+            /** @description The result that joined it last. */
+            latest: components["schemas"]["RunItemDto"] | null;
+            /** @description Newest first, up to 50. */
+            events: components["schemas"]["BreachEventDto"][];
+            /** @description Newest first. */
+            mails: components["schemas"]["OutboxMailDto"][];
+        };
+        BreachDto: {
+            /**
+             * @description The measure whose limit was broken, or `stoppedOnFail`.
+             * @example outputImpedance
+             * @enum {string}
+             */
+            measure: "complianceVoltage" | "effectiveEarlyVoltage" | "impedanceCurrentProduct" | "linearityError" | "loadRegulation" | "outputImpedance" | "referenceCurrent" | "relativeSlope" | "setpointError" | "settlingDrift" | "stoppedOnFail" | "sweepHysteresis";
+            /** @enum {string} */
+            state: "acknowledged" | "closed" | "open";
+            /** @example 12 */
+            breachId: number;
+            /** @example Output impedance out of limits: FH-R500-W at final */
+            title: string;
+            /** @example FH-R500-W */
+            partNumber: string;
+            /** @example final */
+            stage: string;
+            openedAt: string;
+            lastEventAt: string;
+            /** @description Results that belong to it. */
+            eventCount: number;
+            acknowledgedAt: string | null;
+            /** @description Mail address of the person. */
+            acknowledgedBy: string | null;
+            note: string | null;
+            closedAt: string | null;
+            /** @description Mail address of the person. */
+            closedBy: string | null;
+            cause: string | null;
+            /** @description What was done so that it doesn't return. */
+            action: string | null;
+            /** @description The result that joined it last. */
+            latest: components["schemas"]["RunItemDto"] | null;
+        };
+        BreachEventDto: {
+            at: string;
+            /**
+             * @description The judging in words.
+             * @example Output impedance is 3.1 MΩ (3.0 to 3.2 MΩ); at least 5 MΩ is required, so it fails.
+             */
+            text: string;
+            run: components["schemas"]["RunItemDto"];
+        };
+        BreachPageDto: {
+            /** @description Newest opened first. */
+            items: components["schemas"]["BreachDto"][];
+            /** @description Give it back as `cursor` for older ones; null at the end. */
+            nextCursor: string | null;
+        };
+        ChangePasswordDto: {
+            /** @example correct horse battery */
+            currentPassword: string;
+            /**
+             * @description At least 12 characters, at most 72 bytes.
+             * @example three blue resistors
+             */
+            newPassword: string;
+        };
+        CloseBreachDto: {
+            /**
+             * @description Why it happened.
+             * @example A reel of transistors with a low Early voltage.
+             */
+            cause: string;
+            /**
+             * @description What was done so that it doesn't return.
+             * @example Reel returned, incoming check of the Early voltage added.
+             */
+            action: string;
+        };
+        CodedTextDto: {
+            /** @example goldenDue */
+            code: string;
+            text: string;
+        };
+        CohortDto: {
+            firstPass: components["schemas"]["YieldDto"];
+            final: components["schemas"]["YieldDto"];
+            /** @description Units whose first attempt failed. */
+            failed: number;
+            /** @description Units whose first attempt could not be told. */
+            notProven: number;
+            /** @description Units that have not passed yet and may be tested again. */
+            openUnits: number;
+        };
+        CreateApiKeyDto: {
+            /**
+             * @description What tells this key from the station's others.
+             * @example rack PC, bay 2
+             */
+            label: string;
+            /** @description A practice key's results are judged and shown, never counted. */
+            practice: boolean;
+            /**
+             * @description When it stops working, RFC 3339 with zone; null for never.
+             * @example 2027-12-01T00:00:00.000Z
+             */
+            expiresAt?: string | null;
+        };
+        CreateStationDto: {
+            /**
+             * @description Short name; never changes.
+             * @example south-3
+             */
+            station: string;
+            /** @example south */
+            line: string;
+        };
+        CreateUserDto: {
+            /** @example integrator */
+            role: components["schemas"]["Role"];
+            /** @example tomasz.reed@fernhollow.example */
+            email: string;
+            /** @example Tomasz Reed */
+            displayName: string;
+            /**
+             * @description The first password, to be changed by its owner. At least 12 characters, at most 72 bytes.
+             * @example three blue resistors
+             */
+            password: string;
+        };
+        CreatedApiKeyDto: {
+            /** @example 3 */
+            keyId: number;
+            /**
+             * @description The public part, by which the key can be told.
+             * @example k7m2p9qx
+             */
+            prefix: string;
+            label: string;
+            practice: boolean;
+            /** @enum {string} */
+            state: "active" | "expired" | "revoked";
+            createdAt: string;
+            createdBy: string;
+            expiresAt: string | null;
+            revokedAt: string | null;
+            lastUsedAt: string | null;
+            /**
+             * @description The whole key. It is shown this once and kept nowhere.
+             * @example amk_k7m2p9qx_6tR0…
+             */
+            key: string;
+        };
+        CurrentPlanDto: {
+            partNumber: string;
+            stage: string;
+            nominalAmps: number;
+            supplyVolts: number;
+            complianceLowVolts: number;
+            complianceHighVolts: number;
+            maxAttempts: number;
+            /** @description Safety caution of the product, if it needs one. */
+            caution: string | null;
+            testPlan: components["schemas"]["TestPlanDto"] | null;
+            limitSet: components["schemas"]["LimitSetDto"] | null;
+            /** @description Any of these proves the station. */
+            goldenSerialNumbers: string[];
+            /** @description Until when this station shall have measured a golden unit; the past when it is owed; null when none is asked for. */
+            goldenCheckDueAt: string | null;
+        };
+        DemoAccountDto: {
+            email: string;
+            password: string;
+            displayName: string;
+            /** @enum {string} */
+            role: "administrator" | "integrator" | "productionEngineer" | "qualityLead" | "viewer";
+        };
+        FailingMeasureDto: {
+            measure: string;
+            label: string;
+            /** @description First attempts that failed it. */
+            units: number;
+            /** @description Share of all named failures up to and including this one. */
+            cumulativeShare: number;
+        };
+        HealthDto: {
+            status: string;
+            version: string;
+        };
+        HeartbeatDto: {
+            /** @description Set the station's clock by it. */
+            serverTime: string;
+            /** @description Server minus station; null without sentAt. */
+            clockSkewSeconds: number | null;
+        };
+        InstrumentDto: {
+            /** @enum {string} */
+            kind: "ammeter" | "voltmeter";
+            serialNumber: string;
+            model: string | null;
+            /** @description A or V, by kind. */
+            resolution: number | null;
+            readingAccuracyPercent: number | null;
+            rangeAccuracyPercent: number | null;
+            /** @example 2027-03-31 */
+            calibrationDueOn: string | null;
+            calibrationOverdue: boolean;
+        };
+        IntakeItemDto: {
+            /**
+             * @description Names the entry: `r…` accepted, `x…` refused.
+             * @example x12
+             */
+            intakeId: string;
+            /** @enum {string} */
+            kind: "accepted" | "refused";
+            receivedAt: string;
+            /** @description Of the newest time that the very same post came. */
+            lastReceivedAt: string;
+            /** @description How often it came. */
+            count: number;
+            station: string;
+            /** @description HTTP status that it was answered with. */
+            status: number;
+            resultId: string | null;
+            partNumber: string | null;
+            serialNumber: string | null;
+            /** @enum {string|null} */
+            verdict: "aborted" | "fail" | "notProven" | "pass" | "unjudged" | null;
+            /** @description Why it was refused, place by place. */
+            errors: components["schemas"]["ProblemErrorDto"][];
+        };
+        IntakePageDto: {
+            items: components["schemas"]["IntakeItemDto"][];
+            nextCursor: string | null;
+        };
+        JudgedMeasureDto: {
+            /** @example outputImpedance */
+            name: string;
+            value: number | null;
+            /** @example Ω */
+            unit: string;
+            /** @description Half width of the 95 % interval; null where it has no meaning, as for a bound. */
+            expandedUncertainty: number | null;
+            low: number | null;
+            high: number | null;
+            /** @enum {string} */
+            bound: "atLeast" | "atMost" | "exact";
+            limit: components["schemas"]["LimitInForceDto"] | null;
+            /**
+             * @description Null when nothing limits this measure.
+             * @enum {string|null}
+             */
+            outcome: "fail" | "notProven" | "pass" | null;
+            probabilityOfConformity: number | null;
+            /** @description Why there is no value. */
+            reason: string | null;
+            /** @example Output impedance */
+            label: string;
+            /** @description The judging in words. */
+            sentence: string;
+        };
+        LimitInForceDto: {
+            lower: number | null;
+            upper: number | null;
+            /** @enum {string} */
+            rule: "guarded" | "simple";
+            /** @description Guard band w = guardFactor · U. */
+            guardFactor: number;
+        };
+        LimitSetDto: {
+            version: number;
+            releasedAt: string;
+            effectiveAt: string;
+            releasedBy: string;
+            limits: components["schemas"]["MeasureLimitDto"][];
+        };
+        LiveEventDto: {
+            topic: components["schemas"]["LiveTopic"];
+            /** @description What changed, where one thing can be named. */
+            id: string | null;
+        };
         /** @enum {string} */
-        kind: 'resistor' | 'electronicLoad' | 'sourceMeter';
-        serialNumber?: components['schemas']['PostedName'];
-      };
-      fixtureLeakageOhms?: components['schemas']['PostedPositive'];
-      ammeter?: {
-        serialNumber?: components['schemas']['PostedName'];
-        rangeAmps?: components['schemas']['PostedPositive'];
-        resolutionAmps?: components['schemas']['PostedPositive'];
-        readingAccuracyPercent?: components['schemas']['PostedPercent'];
-        rangeAccuracyPercent?: components['schemas']['PostedPercent'];
-        burdenOhms?: number;
-      };
-      voltmeter?: {
-        serialNumber?: components['schemas']['PostedName'];
-        rangeVolts?: components['schemas']['PostedPositive'];
-        resolutionVolts?: components['schemas']['PostedPositive'];
-        readingAccuracyPercent?: components['schemas']['PostedPercent'];
-        rangeAccuracyPercent?: components['schemas']['PostedPercent'];
-        /** @description Give it where the voltmeter's current bypasses the ammeter. */
-        inputOhms?: components['schemas']['PostedPositive'];
-        /** @description True when its leads span load and ammeter: the burden is in loadVolts already. */
-        spansAmmeter?: boolean;
-      };
-      /** @description The load steps in the order they were measured; at least 3 when completed. */
-      points: {
-        /** @description V, positive in the direction in which the nominal current flows through the load. */
-        loadVolts: components['schemas']['PostedReading'];
-        /** @description A, positive when nominal. */
-        outputAmps: components['schemas']['PostedReading'];
-        loadOhms?: number;
-        elapsedMs?: number;
+        LiveTopic: "breaches" | "intake" | "mailbox" | "results" | "stations";
+        MailboxItemDto: {
+            /** @example 1796025342010-9f86d081884c */
+            mailId: string;
+            to: string[];
+            from: string;
+            subject: string;
+            receivedAt: string;
+            messageId: string;
+        };
+        MailboxMailDto: {
+            /** @example 1796025342010-9f86d081884c */
+            mailId: string;
+            to: string[];
+            from: string;
+            subject: string;
+            receivedAt: string;
+            messageId: string;
+            text: string;
+            /** @description As text: show it in a sandboxed frame only. */
+            html: string | null;
+        };
+        MailboxPageDto: {
+            /** @description Everyone who got a mail, whatever the filter. */
+            addresses: string[];
+            /** @description Newest first. */
+            items: components["schemas"]["MailboxItemDto"][];
+        };
+        MeasureLimitDto: {
+            /** @enum {string} */
+            measure: "complianceVoltage" | "effectiveEarlyVoltage" | "impedanceCurrentProduct" | "linearityError" | "loadRegulation" | "outputImpedance" | "referenceCurrent" | "relativeSlope" | "setpointError" | "settlingDrift" | "sweepHysteresis";
+            lower: number | null;
+            upper: number | null;
+            /** @enum {string} */
+            rule: "guarded" | "simple";
+            guardFactor: number;
+            /** @description Largest risk, 0 to 1, that the guard band leaves of passing a unit that lies just outside a limit. */
+            guardedRisk: number;
+        };
+        OutboxMailDto: {
+            /** @enum {string} */
+            state: "failed" | "sent" | "waiting";
+            mailId: number;
+            /** @example quality@fernhollow.example */
+            to: string;
+            subject: string;
+            /** @description Times it was handed to the mail server. */
+            attempts: number;
+            createdAt: string;
+            sentAt: string | null;
+            /** @description What the mail server said to the last try. */
+            lastError: string | null;
+        };
+        PostHeartbeatDto: {
+            /**
+             * @description The station's own clock; shows how far it is off.
+             * @example 2026-11-30T08:15:42.010Z
+             */
+            sentAt?: string;
+        };
+        PostedCelsius: number;
+        PostedName: string;
+        PostedPercent: number;
+        PostedPositive: number;
+        /** @description As the instrument gave it; an overload code such as 9.9e37 is taken as overload. */
+        PostedReading: number;
+        /**
+         * Load-regulation result, station contract version 1
+         * @description One posted sweep with its conditions. Every name carries its unit. An unknown property is refused, so that a misspelt name can't vanish; what has no place here goes into `extra`.
+         */
+        PostedResult: {
+            /**
+             * Format: uuid
+             * @description Named by the station; makes a retry harmless.
+             */
+            resultId: string;
+            /**
+             * @description Only production counts in the yields.
+             * @default production
+             * @enum {string}
+             */
+            runKind?: "production" | "golden" | "study" | "practice";
+            /**
+             * @description What the station says of the run; `aborted` wants an abortReason and counts as no attempt.
+             * @enum {string}
+             */
+            outcome: "completed" | "stoppedOnFail" | "aborted";
+            abortReason?: components["schemas"]["PostedText"];
+            /** @description Place in a gauge study; required when runKind is `study`. */
+            study?: {
+                id: components["schemas"]["PostedName"];
+                trial: number;
+                appraiser?: components["schemas"]["PostedName"];
+                part?: components["schemas"]["PostedName"];
+            };
+            partNumber: components["schemas"]["PostedName"];
+            serialNumber: components["schemas"]["PostedName"];
+            lot?: components["schemas"]["PostedName"];
+            stage: components["schemas"]["PostedName"];
+            channel?: components["schemas"]["PostedName"];
+            startedAt: components["schemas"]["PostedTime"];
+            finishedAt?: components["schemas"]["PostedTime"];
+            /** @description The station's clock when it sent this; shows clock skew. */
+            sentAt?: components["schemas"]["PostedTime"];
+            testPlanVersion?: number;
+            program?: {
+                name: components["schemas"]["PostedName"];
+                version?: components["schemas"]["PostedName"];
+            };
+            /** @description A badge code, never a person's name. */
+            operator?: components["schemas"]["PostedName"];
+            fixture?: components["schemas"]["PostedName"];
+            ambientCelsius?: components["schemas"]["PostedCelsius"];
+            unitCelsius?: components["schemas"]["PostedCelsius"];
+            humidityPercent?: number;
+            dwellMs?: number;
+            warmUpSeconds?: number;
+            supplyVolts?: components["schemas"]["PostedReading"];
+            load?: {
+                /** @enum {string} */
+                kind: "resistor" | "electronicLoad" | "sourceMeter";
+                serialNumber?: components["schemas"]["PostedName"];
+            };
+            fixtureLeakageOhms?: components["schemas"]["PostedPositive"];
+            ammeter?: {
+                serialNumber?: components["schemas"]["PostedName"];
+                rangeAmps?: components["schemas"]["PostedPositive"];
+                resolutionAmps?: components["schemas"]["PostedPositive"];
+                readingAccuracyPercent?: components["schemas"]["PostedPercent"];
+                rangeAccuracyPercent?: components["schemas"]["PostedPercent"];
+                burdenOhms?: number;
+            };
+            voltmeter?: {
+                serialNumber?: components["schemas"]["PostedName"];
+                rangeVolts?: components["schemas"]["PostedPositive"];
+                resolutionVolts?: components["schemas"]["PostedPositive"];
+                readingAccuracyPercent?: components["schemas"]["PostedPercent"];
+                rangeAccuracyPercent?: components["schemas"]["PostedPercent"];
+                /** @description Give it where the voltmeter's current bypasses the ammeter. */
+                inputOhms?: components["schemas"]["PostedPositive"];
+                /** @description True when its leads span load and ammeter: the burden is in loadVolts already. */
+                spansAmmeter?: boolean;
+            };
+            /** @description The load steps in the order they were measured; at least 3 when completed. */
+            points: {
+                /** @description V, positive in the direction in which the nominal current flows through the load. */
+                loadVolts: components["schemas"]["PostedReading"];
+                /** @description A, positive when nominal. */
+                outputAmps: components["schemas"]["PostedReading"];
+                loadOhms?: number;
+                elapsedMs?: number;
+                /** @enum {string} */
+                direction?: "up" | "down" | "repeat";
+                outputAmpsStdDev?: components["schemas"]["PostedPositive"];
+                ammeterRangeAmps?: components["schemas"]["PostedPositive"];
+                overload?: boolean;
+            }[];
+            /** @enum {string} */
+            stationVerdict?: "pass" | "fail";
+            /**
+             * @description Whose verdict moved the unit on.
+             * @enum {string}
+             */
+            routedOn?: "hub" | "station";
+            notes?: string;
+            /** @description Up to 20 named scalars of your own. */
+            extra?: {
+                [key: string]: string | number | boolean | null;
+            };
+        } & (unknown & unknown & unknown);
+        PostedText: string;
+        /**
+         * Format: date-time
+         * @description RFC 3339, with zone.
+         */
+        PostedTime: string;
+        ProblemDto: {
+            /**
+             * @description Where the docs explain it.
+             * @example /docs/errors#invalid
+             */
+            type: string;
+            /** @example The content is not valid */
+            title: string;
+            /** @example 422 */
+            status: number;
+            detail: string;
+            /**
+             * @description Stable; write your program against it.
+             * @example invalid
+             */
+            code: string;
+            errors?: components["schemas"]["ProblemErrorDto"][];
+        };
+        ProblemErrorDto: {
+            /**
+             * @description JSON Pointer (RFC 6901) to the place; empty for the whole.
+             * @example /points/3/loadVolts
+             */
+            pointer: string;
+            /** @example required */
+            code: string;
+            /** @description What is wrong there and what to do. */
+            detail: string;
+        };
+        ProductDto: {
+            /** @example FH-R500-W */
+            partNumber: string;
+            description: string;
+            nominalAmps: number;
+            supplyVolts: number;
+            complianceLowVolts: number;
+            complianceHighVolts: number;
+            /** @description τ as a fraction. */
+            complianceTolerance: number;
+            /** @enum {string} */
+            direction: "sink" | "source";
+            /** @enum {string} */
+            circuitKind: "cascode" | "opAmpPassTransistor" | "other" | "twoTransistorMirror" | "wilsonMirror";
+            caution: string | null;
+            stages: components["schemas"]["ProductStageDto"][];
+        };
+        ProductStageDto: {
+            stage: string;
+            /** @description 1 comes first. */
+            position: number;
+            maxAttempts: number;
+            yieldTarget: number | null;
+            /** @description In force now. */
+            testPlan: components["schemas"]["TestPlanDto"] | null;
+            /** @description In force now. */
+            limitSet: components["schemas"]["LimitSetDto"] | null;
+        };
+        ProofDto: {
+            /** @example 2026-11-30T12:00:00.000Z */
+            computedAt: string;
+            /** @example 0.1.0 */
+            version: string;
+            /** @description Rows that agree to the digits required. */
+            passed: number;
+            failed: number;
+            rows: components["schemas"]["ProofRowDto"][];
+        };
+        ProofRowDto: {
+            /** @example reg-nist-norris */
+            caseId: string;
+            /** @example StRD linear regression: Norris */
+            title: string;
+            /** @example NIST Statistical Reference Datasets (StRD), linear regression — Norris data set */
+            source: string;
+            /**
+             * @description `source read`: the printed figure was seen in some text; `from memory`: recalled, then recomputed; `derived`: no
+             *     printed figure is known, the value was computed independently.
+             * @example source read
+             * @enum {string}
+             */
+            status: "derived" | "from memory" | "source read";
+            /** @example estimate.B1 */
+            quantity: string;
+            /**
+             * @description The digits of the source, as text.
+             * @example 1.00211681802045
+             */
+            published: string;
+            /** @example 1.00211681802045 */
+            computed: string;
+            /**
+             * @description At most 15: double precision holds no more.
+             * @example 14
+             */
+            agreeingDigits: number;
+            /** @example 11 */
+            requiredDigits: number;
+            ok: boolean;
+        };
+        RefusedPostDto: {
+            /**
+             * @description Names the entry: `r…` accepted, `x…` refused.
+             * @example x12
+             */
+            intakeId: string;
+            /** @enum {string} */
+            kind: "accepted" | "refused";
+            receivedAt: string;
+            /** @description Of the newest time that the very same post came. */
+            lastReceivedAt: string;
+            /** @description How often it came. */
+            count: number;
+            station: string;
+            /** @description HTTP status that it was answered with. */
+            status: number;
+            resultId: string | null;
+            partNumber: string | null;
+            serialNumber: string | null;
+            /** @enum {string|null} */
+            verdict: "aborted" | "fail" | "notProven" | "pass" | "unjudged" | null;
+            /** @description Why it was refused, place by place. */
+            errors: components["schemas"]["ProblemErrorDto"][];
+            title: string;
+            detail: string;
+            /** @description As received; cut off when it was too long to keep whole. */
+            body: string;
+            bodyBytes: number;
+            bodyTruncated: boolean;
+        };
+        ResultAnswerDto: {
+            /** @example 0193f3a2-6f0e-7c52-9a3e-5b1f4c0d2e11 */
+            resultId: string;
+            receivedAt: string;
+            /** @enum {string} */
+            verdict: "aborted" | "fail" | "notProven" | "pass" | "unjudged";
+            /** @description Number among the unit's counted results at this stage; null when it isn't counted. */
+            attempt: number | null;
+            /**
+             * @description Where the unit shall go.
+             * @enum {string}
+             */
+            disposition: "hold" | "next" | "repair" | "retest" | "retestElsewhere" | "stop";
+            nextStage: string | null;
+            attemptsLeft: number | null;
+            /** @description Null when there is no prior stage. */
+            priorStagePassed: boolean | null;
+            lotHeld: boolean;
+            testPlanVersion: number | null;
+            limitSetVersion: number | null;
+            measures: components["schemas"]["AnsweredMeasureDto"][];
+            failedMeasures: string[];
+            warnings: components["schemas"]["CodedTextDto"][];
+            flags: string[];
+            links: components["schemas"]["ResultLinksDto"];
+        };
+        ResultDetailDto: {
+            /** @example 0193f3a2-6f0e-7c52-9a3e-5b1f4c0d2e11 */
+            resultId: string;
+            receivedAt: string;
+            startedAt: string;
+            /** @example FH-R500-W */
+            partNumber: string;
+            /** @example W26480417 */
+            serialNumber: string;
+            lot: string | null;
+            /** @example final */
+            stage: string;
+            /** @example north-2 */
+            station: string;
+            /** @description Null where attempts aren't counted. */
+            attempt: number | null;
+            /** @enum {string} */
+            verdict: "aborted" | "fail" | "notProven" | "pass" | "unjudged";
+            /** @enum {string} */
+            runKind: "golden" | "practice" | "production" | "study";
+            /** @enum {string} */
+            outcome: "aborted" | "completed" | "stoppedOnFail";
+            slope: components["schemas"]["SlopeMarkDto"];
+            failedMeasures: string[];
+            flags: string[];
+            finishedAt: string | null;
+            sentAt: string | null;
+            /** @description A badge code. */
+            operator: string | null;
+            fixture: string | null;
+            channel: string | null;
+            programName: string | null;
+            programVersion: string | null;
+            ambientCelsius: number | null;
+            supplyVolts: number | null;
+            abortReason: string | null;
+            /** @enum {string|null} */
+            stationVerdict: "fail" | "pass" | null;
+            /** @enum {string|null} */
+            routedOn: "hub" | "station" | null;
+            notes: string | null;
+            testPlanVersion: number | null;
+            limitSetVersion: number | null;
+            /** @enum {string} */
+            disposition: "hold" | "next" | "repair" | "retest" | "retestElsewhere" | "stop";
+            nextStage: string | null;
+            attemptsLeft: number | null;
+            measures: components["schemas"]["JudgedMeasureDto"][];
+            sweep: components["schemas"]["SweepDto"];
+            /** @description The flags with their meaning. */
+            flagTexts: components["schemas"]["CodedTextDto"][];
+            warnings: components["schemas"]["CodedTextDto"][];
+        };
+        ResultLinksDto: {
+            /** @description Where this result can be read again with the same key. */
+            self: string;
+            /** @description The unit's page for people. */
+            unit: string;
+        };
+        ResultPageDto: {
+            items: components["schemas"]["RunItemDto"][];
+            /** @description Give it back as `cursor` for older ones; null at the end. */
+            nextCursor: string | null;
+        };
+        RetestsDto: {
+            /** @description Units tested more than once. */
+            retested: number;
+            total: number;
+            /**
+             * @description Of these, passed at the second attempt. Many of them, with nothing changed between, are a sign of a
+             *     measuring problem.
+             */
+            passedOnSecond: number;
+        };
+        RightDto: {
+            /**
+             * @description Who may use it; `roles` names the people. `station`: with an API key, besides people, if any.
+             * @example roles
+             * @enum {string}
+             */
+            access: "anySignedIn" | "public" | "roles" | "station";
+            /**
+             * @example [
+             *       "administrator"
+             *     ]
+             */
+            roles: components["schemas"]["Role"][];
+            /** @example POST */
+            method: string;
+            /** @example /api/v1/users */
+            path: string;
+            /** @example Create an account */
+            summary: string;
+        };
         /** @enum {string} */
-        direction?: 'up' | 'down' | 'repeat';
-        outputAmpsStdDev?: components['schemas']['PostedPositive'];
-        ammeterRangeAmps?: components['schemas']['PostedPositive'];
-        overload?: boolean;
-      }[];
-      /** @enum {string} */
-      stationVerdict?: 'pass' | 'fail';
-      /**
-       * @description Whose verdict moved the unit on.
-       * @enum {string}
-       */
-      routedOn?: 'hub' | 'station';
-      notes?: string;
-      /** @description Up to 20 named scalars of your own. */
-      extra?: {
-        [key: string]: string | number | boolean | null;
-      };
-    } & (unknown & unknown & unknown);
-    PostedText: string;
-    /**
-     * Format: date-time
-     * @description RFC 3339, with zone.
-     */
-    PostedTime: string;
-    ProblemDto: {
-      /**
-       * @description Where the docs explain it.
-       * @example /docs/errors#invalid
-       */
-      type: string;
-      /** @example The content is not valid */
-      title: string;
-      /** @example 422 */
-      status: number;
-      detail: string;
-      /**
-       * @description Stable; write your program against it.
-       * @example invalid
-       */
-      code: string;
-      errors?: components['schemas']['ProblemErrorDto'][];
+        Role: "administrator" | "integrator" | "productionEngineer" | "qualityLead" | "viewer";
+        RunItemDto: {
+            /** @example 0193f3a2-6f0e-7c52-9a3e-5b1f4c0d2e11 */
+            resultId: string;
+            receivedAt: string;
+            startedAt: string;
+            /** @example FH-R500-W */
+            partNumber: string;
+            /** @example W26480417 */
+            serialNumber: string;
+            lot: string | null;
+            /** @example final */
+            stage: string;
+            /** @example north-2 */
+            station: string;
+            /** @description Null where attempts aren't counted. */
+            attempt: number | null;
+            /** @enum {string} */
+            verdict: "aborted" | "fail" | "notProven" | "pass" | "unjudged";
+            /** @enum {string} */
+            runKind: "golden" | "practice" | "production" | "study";
+            /** @enum {string} */
+            outcome: "aborted" | "completed" | "stoppedOnFail";
+            slope: components["schemas"]["SlopeMarkDto"];
+            failedMeasures: string[];
+            flags: string[];
+        };
+        SessionDto: {
+            user: components["schemas"]["UserDto"];
+        };
+        SignInDto: {
+            /** @example rosalind.hart@fernhollow.example */
+            email: string;
+            /** @example correct horse battery */
+            password: string;
+        };
+        SiteDto: {
+            /** @example Fernhollow Controls */
+            name: string;
+            /** @example Europe/London */
+            timeZone: string;
+            /** @description Invented data, public accounts. */
+            demo: boolean;
+            /** @description Mails go to a mailbox inside this program, readable in the dashboard. */
+            localMailbox: boolean;
+            /** @example 0.1.0 */
+            version: string;
+            /** @description Empty outside the demo. */
+            demoAccounts: components["schemas"]["DemoAccountDto"][];
+        };
+        SlopeMarkDto: {
+            conductanceSiemens: number | null;
+            /** @description Expanded, k ≈ 2. */
+            expandedUncertaintySiemens: number | null;
+            /** @description The slope that the limit allows. */
+            limitSiemens: number | null;
+            impedanceOhms: number | null;
+            /** @enum {string} */
+            impedanceBound: "atLeast" | "atMost" | "exact";
+            referenceAmps: number | null;
+        };
+        StationDto: {
+            /** @example north-2 */
+            station: string;
+            line: string;
+            active: boolean;
+            /**
+             * @description `posting`: within the last ten minutes.
+             * @enum {string}
+             */
+            state: "neverPosted" | "posting" | "quiet";
+            lastPostAt: string | null;
+            lastHeartbeatAt: string | null;
+            latest: components["schemas"]["RunItemDto"] | null;
+            postsToday: number;
+            refusedToday: number;
+            clockSkewSeconds: number | null;
+            /** @description When the next golden check is owed; null when none is asked for or none was made yet. */
+            goldenDueAt: string | null;
+            instruments: components["schemas"]["InstrumentDto"][];
+        };
+        SweepDto: {
+            referenceVolts: number;
+            referenceAmps: number | null;
+            complianceLowVolts: number;
+            complianceHighVolts: number;
+            /** @description τ as a fraction. */
+            complianceTolerance: number;
+            resolutionAmps: number | null;
+            points: components["schemas"]["SweepPointDto"][];
+            /** @description The fit with its uncertainty band, over the range that was fitted. */
+            line: components["schemas"]["SweepLinePointDto"][];
+            /** @description The slope that the limit allows, through the reference point; empty without such a limit. */
+            limitLine: components["schemas"]["SweepLinePointDto"][];
+            complianceVolts: number | null;
+            /** @enum {string} */
+            complianceBound: "atLeast" | "atMost" | "exact";
+            kneeFound: boolean;
+            fit: components["schemas"]["SweepFitDto"] | null;
+        };
+        SweepFitDto: {
+            interceptAmps: number;
+            /** @description dI/dV; the output conductance is its negative. */
+            slopeSiemens: number;
+            /** @description k ≈ 2, resolution, gain and drift included. */
+            expandedSlopeUncertaintySiemens: number;
+            residualStdDevAmps: number;
+            rSquared: number;
+            degreesOfFreedom: number;
+        };
+        SweepLinePointDto: {
+            loadVolts: number;
+            deviationPpm: number;
+            lowPpm: number;
+            highPpm: number;
+        };
+        SweepPointDto: {
+            /** @description Place in the post, from 0. */
+            index: number;
+            loadVolts: number;
+            outputAmps: number;
+            /** @description Deviation from the reference current. */
+            deviationPpm: number | null;
+            /** @enum {string|null} */
+            direction: "down" | "repeat" | "up" | null;
+            /** @description The straight line was fitted through it. */
+            inFit: boolean;
+            overload: boolean;
+        };
+        TestPlanDto: {
+            version: number;
+            loadVolts: number[];
+            referenceVolts: number;
+            dwellMs: number;
+            repeatFirst: boolean;
+            upAndDown: boolean;
+        };
+        TodayChangeDto: {
+            /** @enum {string} */
+            kind: "firstPass" | "notProven" | "silent";
+            text: string;
+            partNumber: string | null;
+            stage: string | null;
+            station: string | null;
+        };
+        TodayDto: {
+            /**
+             * @description Day in the site's time zone.
+             * @example 2026-12-01
+             */
+            date: string;
+            timeZone: string;
+            products: components["schemas"]["TodayProductDto"][];
+            /** @description What is getting worse. */
+            worse: components["schemas"]["TodayChangeDto"][];
+            openBreaches: components["schemas"]["BreachDto"][];
+            /** @description The newest results, the newest first. */
+            recent: components["schemas"]["RunItemDto"][];
+        };
+        TodayProductDto: {
+            partNumber: string;
+            description: string;
+            stages: components["schemas"]["TodayStageDto"][];
+            /** @description Product of the stages' first-pass yields; `passed` and `total` are those of the last stage. */
+            rolledThroughput: components["schemas"]["YieldDto"] | null;
+        };
+        TodayStageDto: {
+            stage: string;
+            /** @description First-pass yield wanted, as a share. */
+            target: number | null;
+            firstPass: components["schemas"]["YieldDto"];
+            final: components["schemas"]["YieldDto"];
+            /** @description Units whose first attempt failed. */
+            failed: number;
+            /** @description Units whose first attempt could not be told. */
+            notProven: number;
+            /** @description Units that have not passed yet and may be tested again. */
+            openUnits: number;
+            /** @description First-pass yield of the seven site days before. */
+            previous: components["schemas"]["YieldDto"];
+        };
+        UnitDto: {
+            partNumber: string;
+            serialNumber: string;
+            lot: string | null;
+            description: string;
+            /** @description Safety caution of the product, if it needs one. */
+            caution: string | null;
+            stages: components["schemas"]["UnitStageDto"][];
+        };
+        UnitItemDto: {
+            partNumber: string;
+            serialNumber: string;
+            lot: string | null;
+            lastTestedAt: string;
+            latest: components["schemas"]["RunItemDto"];
+            /** @description The result that the question is about (`of`): the latest one, or a first attempt. */
+            asked: components["schemas"]["RunItemDto"];
+            stages: components["schemas"]["UnitStageStateDto"][];
+        };
+        UnitPageDto: {
+            items: components["schemas"]["UnitItemDto"][];
+            nextCursor: string | null;
+        };
+        UnitRouteDto: {
+            partNumber: string;
+            serialNumber: string;
+            stage: string;
+            mayBeTested: boolean;
+            /** @description Why not, in words; null when it may. */
+            reason: string | null;
+            /** @description Counted results at this stage so far. */
+            attempts: number;
+            attemptsLeft: number;
+            /**
+             * @description Of its latest attempt at this stage.
+             * @enum {string|null}
+             */
+            latestVerdict: "aborted" | "fail" | "notProven" | "pass" | "unjudged" | null;
+            priorStage: string | null;
+            /** @description Null when there is no prior stage. */
+            priorStagePassed: boolean | null;
+            lotHeld: boolean;
+        };
+        UnitStageDto: {
+            stage: string;
+            maxAttempts: number;
+            /**
+             * @description Of the latest attempt; null when there is none.
+             * @enum {string|null}
+             */
+            verdict: "aborted" | "fail" | "notProven" | "pass" | "unjudged" | null;
+            /** @description All results, the oldest first, golden and practice ones included. */
+            results: components["schemas"]["RunItemDto"][];
+        };
+        UnitStageStateDto: {
+            stage: string;
+            /** @description Counted results so far. */
+            attempts: number;
+            /**
+             * @description Of the latest attempt; null when there is none.
+             * @enum {string|null}
+             */
+            verdict: "aborted" | "fail" | "notProven" | "pass" | "unjudged" | null;
+        };
+        UpdateUserDto: {
+            /** @example productionEngineer */
+            role?: components["schemas"]["Role"];
+            /** @example Tomasz Reed-Hale */
+            displayName?: string;
+            /** @description False disables the account and ends its sessions at once. */
+            active?: boolean;
+            /**
+             * @description A new password; ends the account's sessions. At least 12 characters, at most 72 bytes.
+             * @example seven amber cascodes
+             */
+            password?: string;
+        };
+        UserDto: {
+            /** @example qualityLead */
+            role: components["schemas"]["Role"];
+            /** @example 3 */
+            userId: number;
+            /**
+             * @description What the person signs in with, in lower case.
+             * @example rosalind.hart@fernhollow.example
+             */
+            email: string;
+            /** @example Rosalind Hart */
+            displayName: string;
+            /** @description A disabled account can't sign in; its name stays in the records. */
+            active: boolean;
+            /** @example 2026-11-02T07:30:00.000Z */
+            createdAt: string;
+            /**
+             * @description Null until the first time.
+             * @example 2026-11-30T06:02:11.000Z
+             */
+            lastSignInAt: string | null;
+        };
+        YieldBucketDto: {
+            firstPass: components["schemas"]["YieldDto"];
+            final: components["schemas"]["YieldDto"];
+            /** @description Units whose first attempt failed. */
+            failed: number;
+            /** @description Units whose first attempt could not be told. */
+            notProven: number;
+            /** @description Units that have not passed yet and may be tested again. */
+            openUnits: number;
+            startAt: string;
+            endAt: string;
+            /** @description Product of the stages' first-pass yields; only of a single product and all its stages. */
+            rolledThroughput: components["schemas"]["YieldDto"] | null;
+        };
+        YieldDto: {
+            passed: number;
+            total: number;
+            share: number | null;
+            low: number | null;
+            high: number | null;
+        };
+        YieldGroupDto: {
+            firstPass: components["schemas"]["YieldDto"];
+            final: components["schemas"]["YieldDto"];
+            /** @description Units whose first attempt failed. */
+            failed: number;
+            /** @description Units whose first attempt could not be told. */
+            notProven: number;
+            /** @description Units that have not passed yet and may be tested again. */
+            openUnits: number;
+            /** @description Null where the first attempt didn't say. */
+            name: string | null;
+            buckets: components["schemas"]["YieldDto"][];
+        };
+        YieldMarkerDto: {
+            at: string;
+            /** @enum {string} */
+            kind: "limitSet" | "program" | "testPlan";
+            text: string;
+        };
+        YieldReportDto: {
+            from: string;
+            to: string;
+            /** @enum {string} */
+            by: "day" | "hour" | "week";
+            timeZone: string;
+            whole: components["schemas"]["CohortDto"];
+            rolledThroughput: components["schemas"]["YieldDto"] | null;
+            buckets: components["schemas"]["YieldBucketDto"][];
+            /** @description Empty without a split; the largest first. */
+            groups: components["schemas"]["YieldGroupDto"][];
+            failingMeasures: components["schemas"]["FailingMeasureDto"][];
+            retests: components["schemas"]["RetestsDto"];
+            aborts: components["schemas"]["AbortsDto"];
+            markers: components["schemas"]["YieldMarkerDto"][];
+        };
     };
-    ProblemErrorDto: {
-      /**
-       * @description JSON Pointer (RFC 6901) to the place; empty for the whole.
-       * @example /points/3/loadVolts
-       */
-      pointer: string;
-      /** @example required */
-      code: string;
-      /** @description What is wrong there and what to do. */
-      detail: string;
-    };
-    ProductDto: {
-      /** @example FH-R500-W */
-      partNumber: string;
-      description: string;
-      nominalAmps: number;
-      supplyVolts: number;
-      complianceLowVolts: number;
-      complianceHighVolts: number;
-      /** @description τ as a fraction. */
-      complianceTolerance: number;
-      /** @enum {string} */
-      direction: 'sink' | 'source';
-      /** @enum {string} */
-      circuitKind: 'cascode' | 'opAmpPassTransistor' | 'other' | 'twoTransistorMirror' | 'wilsonMirror';
-      caution: string | null;
-      stages: components['schemas']['ProductStageDto'][];
-    };
-    ProductStageDto: {
-      stage: string;
-      /** @description 1 comes first. */
-      position: number;
-      maxAttempts: number;
-      yieldTarget: number | null;
-      /** @description In force now. */
-      testPlan: components['schemas']['TestPlanDto'] | null;
-      /** @description In force now. */
-      limitSet: components['schemas']['LimitSetDto'] | null;
-    };
-    ProofDto: {
-      /** @example 2026-11-30T12:00:00.000Z */
-      computedAt: string;
-      /** @example 0.1.0 */
-      version: string;
-      /** @description Rows that agree to the digits required. */
-      passed: number;
-      failed: number;
-      rows: components['schemas']['ProofRowDto'][];
-    };
-    ProofRowDto: {
-      /** @example reg-nist-norris */
-      caseId: string;
-      /** @example StRD linear regression: Norris */
-      title: string;
-      /** @example NIST Statistical Reference Datasets (StRD), linear regression — Norris data set */
-      source: string;
-      /**
-       * @description `source read`: the printed figure was seen in some text; `from memory`: recalled, then recomputed; `derived`: no
-       *     printed figure is known, the value was computed independently.
-       * @example source read
-       * @enum {string}
-       */
-      status: 'derived' | 'from memory' | 'source read';
-      /** @example estimate.B1 */
-      quantity: string;
-      /**
-       * @description The digits of the source, as text.
-       * @example 1.00211681802045
-       */
-      published: string;
-      /** @example 1.00211681802045 */
-      computed: string;
-      /**
-       * @description At most 15: double precision holds no more.
-       * @example 14
-       */
-      agreeingDigits: number;
-      /** @example 11 */
-      requiredDigits: number;
-      ok: boolean;
-    };
-    RefusedPostDto: {
-      /**
-       * @description Names the entry: `r…` accepted, `x…` refused.
-       * @example x12
-       */
-      intakeId: string;
-      /** @enum {string} */
-      kind: 'accepted' | 'refused';
-      receivedAt: string;
-      /** @description Of the newest time that the very same post came. */
-      lastReceivedAt: string;
-      /** @description How often it came. */
-      count: number;
-      station: string;
-      /** @description HTTP status that it was answered with. */
-      status: number;
-      resultId: string | null;
-      partNumber: string | null;
-      serialNumber: string | null;
-      /** @enum {string|null} */
-      verdict: 'aborted' | 'fail' | 'notProven' | 'pass' | 'unjudged' | null;
-      /** @description Why it was refused, place by place. */
-      errors: components['schemas']['ProblemErrorDto'][];
-      title: string;
-      detail: string;
-      /** @description As received; cut off when it was too long to keep whole. */
-      body: string;
-      bodyBytes: number;
-      bodyTruncated: boolean;
-    };
-    ResultAnswerDto: {
-      /** @example 0193f3a2-6f0e-7c52-9a3e-5b1f4c0d2e11 */
-      resultId: string;
-      receivedAt: string;
-      /** @enum {string} */
-      verdict: 'aborted' | 'fail' | 'notProven' | 'pass' | 'unjudged';
-      /** @description Number among the unit's counted results at this stage; null when it isn't counted. */
-      attempt: number | null;
-      /**
-       * @description Where the unit shall go.
-       * @enum {string}
-       */
-      disposition: 'hold' | 'next' | 'repair' | 'retest' | 'retestElsewhere' | 'stop';
-      nextStage: string | null;
-      attemptsLeft: number | null;
-      /** @description Null when there is no prior stage. */
-      priorStagePassed: boolean | null;
-      lotHeld: boolean;
-      testPlanVersion: number | null;
-      limitSetVersion: number | null;
-      measures: components['schemas']['AnsweredMeasureDto'][];
-      failedMeasures: string[];
-      warnings: components['schemas']['CodedTextDto'][];
-      flags: string[];
-      links: components['schemas']['ResultLinksDto'];
-    };
-    ResultDetailDto: {
-      /** @example 0193f3a2-6f0e-7c52-9a3e-5b1f4c0d2e11 */
-      resultId: string;
-      receivedAt: string;
-      startedAt: string;
-      /** @example FH-R500-W */
-      partNumber: string;
-      /** @example W26480417 */
-      serialNumber: string;
-      lot: string | null;
-      /** @example final */
-      stage: string;
-      /** @example north-2 */
-      station: string;
-      /** @description Null where attempts aren't counted. */
-      attempt: number | null;
-      /** @enum {string} */
-      verdict: 'aborted' | 'fail' | 'notProven' | 'pass' | 'unjudged';
-      /** @enum {string} */
-      runKind: 'golden' | 'practice' | 'production' | 'study';
-      /** @enum {string} */
-      outcome: 'aborted' | 'completed' | 'stoppedOnFail';
-      slope: components['schemas']['SlopeMarkDto'];
-      failedMeasures: string[];
-      flags: string[];
-      finishedAt: string | null;
-      sentAt: string | null;
-      /** @description A badge code. */
-      operator: string | null;
-      fixture: string | null;
-      channel: string | null;
-      programName: string | null;
-      programVersion: string | null;
-      ambientCelsius: number | null;
-      supplyVolts: number | null;
-      abortReason: string | null;
-      /** @enum {string|null} */
-      stationVerdict: 'fail' | 'pass' | null;
-      /** @enum {string|null} */
-      routedOn: 'hub' | 'station' | null;
-      notes: string | null;
-      testPlanVersion: number | null;
-      limitSetVersion: number | null;
-      /** @enum {string} */
-      disposition: 'hold' | 'next' | 'repair' | 'retest' | 'retestElsewhere' | 'stop';
-      nextStage: string | null;
-      attemptsLeft: number | null;
-      measures: components['schemas']['JudgedMeasureDto'][];
-      sweep: components['schemas']['SweepDto'];
-      /** @description The flags with their meaning. */
-      flagTexts: components['schemas']['CodedTextDto'][];
-      warnings: components['schemas']['CodedTextDto'][];
-    };
-    ResultLinksDto: {
-      /** @description Where this result can be read again with the same key. */
-      self: string;
-      /** @description The unit's page for people. */
-      unit: string;
-    };
-    ResultPageDto: {
-      items: components['schemas']['RunItemDto'][];
-      /** @description Give it back as `cursor` for older ones; null at the end. */
-      nextCursor: string | null;
-    };
-    RetestsDto: {
-      /** @description Units tested more than once. */
-      retested: number;
-      total: number;
-      /**
-       * @description Of these, passed at the second attempt. Many of them, with nothing changed between, are a sign of a
-       *     measuring problem.
-       */
-      passedOnSecond: number;
-    };
-    RightDto: {
-      /**
-       * @description Who may use it; `roles` names the people. `station`: with an API key, besides people, if any.
-       * @example roles
-       * @enum {string}
-       */
-      access: 'anySignedIn' | 'public' | 'roles' | 'station';
-      /**
-       * @example [
-       *       "administrator"
-       *     ]
-       */
-      roles: components['schemas']['Role'][];
-      /** @example POST */
-      method: string;
-      /** @example /api/v1/users */
-      path: string;
-      /** @example Create an account */
-      summary: string;
-    };
-    /** @enum {string} */
-    Role: 'administrator' | 'integrator' | 'productionEngineer' | 'qualityLead' | 'viewer';
-    RunItemDto: {
-      /** @example 0193f3a2-6f0e-7c52-9a3e-5b1f4c0d2e11 */
-      resultId: string;
-      receivedAt: string;
-      startedAt: string;
-      /** @example FH-R500-W */
-      partNumber: string;
-      /** @example W26480417 */
-      serialNumber: string;
-      lot: string | null;
-      /** @example final */
-      stage: string;
-      /** @example north-2 */
-      station: string;
-      /** @description Null where attempts aren't counted. */
-      attempt: number | null;
-      /** @enum {string} */
-      verdict: 'aborted' | 'fail' | 'notProven' | 'pass' | 'unjudged';
-      /** @enum {string} */
-      runKind: 'golden' | 'practice' | 'production' | 'study';
-      /** @enum {string} */
-      outcome: 'aborted' | 'completed' | 'stoppedOnFail';
-      slope: components['schemas']['SlopeMarkDto'];
-      failedMeasures: string[];
-      flags: string[];
-    };
-    SessionDto: {
-      user: components['schemas']['UserDto'];
-    };
-    SignInDto: {
-      /** @example rosalind.hart@fernhollow.example */
-      email: string;
-      /** @example correct horse battery */
-      password: string;
-    };
-    SiteDto: {
-      /** @example Fernhollow Controls */
-      name: string;
-      /** @example Europe/London */
-      timeZone: string;
-      /** @description Invented data, public accounts. */
-      demo: boolean;
-      /** @description Mails go to a mailbox inside this program, readable in the dashboard. */
-      localMailbox: boolean;
-      /** @example 0.1.0 */
-      version: string;
-      /** @description Empty outside the demo. */
-      demoAccounts: components['schemas']['DemoAccountDto'][];
-    };
-    SlopeMarkDto: {
-      conductanceSiemens: number | null;
-      /** @description Expanded, k ≈ 2. */
-      expandedUncertaintySiemens: number | null;
-      /** @description The slope that the limit allows. */
-      limitSiemens: number | null;
-      impedanceOhms: number | null;
-      /** @enum {string} */
-      impedanceBound: 'atLeast' | 'atMost' | 'exact';
-      referenceAmps: number | null;
-    };
-    StationDto: {
-      /** @example north-2 */
-      station: string;
-      line: string;
-      active: boolean;
-      /**
-       * @description `posting`: within the last ten minutes.
-       * @enum {string}
-       */
-      state: 'neverPosted' | 'posting' | 'quiet';
-      lastPostAt: string | null;
-      lastHeartbeatAt: string | null;
-      latest: components['schemas']['RunItemDto'] | null;
-      postsToday: number;
-      refusedToday: number;
-      clockSkewSeconds: number | null;
-      /** @description When the next golden check is owed; null when none is asked for or none was made yet. */
-      goldenDueAt: string | null;
-      instruments: components['schemas']['InstrumentDto'][];
-    };
-    SweepDto: {
-      referenceVolts: number;
-      referenceAmps: number | null;
-      complianceLowVolts: number;
-      complianceHighVolts: number;
-      /** @description τ as a fraction. */
-      complianceTolerance: number;
-      resolutionAmps: number | null;
-      points: components['schemas']['SweepPointDto'][];
-      /** @description The fit with its uncertainty band, over the range that was fitted. */
-      line: components['schemas']['SweepLinePointDto'][];
-      /** @description The slope that the limit allows, through the reference point; empty without such a limit. */
-      limitLine: components['schemas']['SweepLinePointDto'][];
-      complianceVolts: number | null;
-      /** @enum {string} */
-      complianceBound: 'atLeast' | 'atMost' | 'exact';
-      kneeFound: boolean;
-      fit: components['schemas']['SweepFitDto'] | null;
-    };
-    SweepFitDto: {
-      interceptAmps: number;
-      /** @description dI/dV; the output conductance is its negative. */
-      slopeSiemens: number;
-      /** @description k ≈ 2, resolution, gain and drift included. */
-      expandedSlopeUncertaintySiemens: number;
-      residualStdDevAmps: number;
-      rSquared: number;
-      degreesOfFreedom: number;
-    };
-    SweepLinePointDto: {
-      loadVolts: number;
-      deviationPpm: number;
-      lowPpm: number;
-      highPpm: number;
-    };
-    SweepPointDto: {
-      /** @description Place in the post, from 0. */
-      index: number;
-      loadVolts: number;
-      outputAmps: number;
-      /** @description Deviation from the reference current. */
-      deviationPpm: number | null;
-      /** @enum {string|null} */
-      direction: 'down' | 'repeat' | 'up' | null;
-      /** @description The straight line was fitted through it. */
-      inFit: boolean;
-      overload: boolean;
-    };
-    TestPlanDto: {
-      version: number;
-      loadVolts: number[];
-      referenceVolts: number;
-      dwellMs: number;
-      repeatFirst: boolean;
-      upAndDown: boolean;
-    };
-    TodayChangeDto: {
-      /** @enum {string} */
-      kind: 'firstPass' | 'notProven' | 'silent';
-      text: string;
-      partNumber: string | null;
-      stage: string | null;
-      station: string | null;
-    };
-    TodayDto: {
-      /**
-       * @description Day in the site's time zone.
-       * @example 2026-12-01
-       */
-      date: string;
-      timeZone: string;
-      products: components['schemas']['TodayProductDto'][];
-      /** @description What is getting worse. */
-      worse: components['schemas']['TodayChangeDto'][];
-      openBreaches: components['schemas']['BreachDto'][];
-      /** @description The newest results, the newest first. */
-      recent: components['schemas']['RunItemDto'][];
-    };
-    TodayProductDto: {
-      partNumber: string;
-      description: string;
-      stages: components['schemas']['TodayStageDto'][];
-      /** @description Product of the stages' first-pass yields; `passed` and `total` are those of the last stage. */
-      rolledThroughput: components['schemas']['YieldDto'] | null;
-    };
-    TodayStageDto: {
-      stage: string;
-      /** @description First-pass yield wanted, as a share. */
-      target: number | null;
-      firstPass: components['schemas']['YieldDto'];
-      final: components['schemas']['YieldDto'];
-      /** @description Units whose first attempt failed. */
-      failed: number;
-      /** @description Units whose first attempt could not be told. */
-      notProven: number;
-      /** @description Units that have not passed yet and may be tested again. */
-      openUnits: number;
-      /** @description First-pass yield of the seven site days before. */
-      previous: components['schemas']['YieldDto'];
-    };
-    UnitDto: {
-      partNumber: string;
-      serialNumber: string;
-      lot: string | null;
-      description: string;
-      /** @description Safety caution of the product, if it needs one. */
-      caution: string | null;
-      stages: components['schemas']['UnitStageDto'][];
-    };
-    UnitItemDto: {
-      partNumber: string;
-      serialNumber: string;
-      lot: string | null;
-      lastTestedAt: string;
-      latest: components['schemas']['RunItemDto'];
-      /** @description The result that the question is about (`of`): the latest one, or a first attempt. */
-      asked: components['schemas']['RunItemDto'];
-      stages: components['schemas']['UnitStageStateDto'][];
-    };
-    UnitPageDto: {
-      items: components['schemas']['UnitItemDto'][];
-      nextCursor: string | null;
-    };
-    UnitRouteDto: {
-      partNumber: string;
-      serialNumber: string;
-      stage: string;
-      mayBeTested: boolean;
-      /** @description Why not, in words; null when it may. */
-      reason: string | null;
-      /** @description Counted results at this stage so far. */
-      attempts: number;
-      attemptsLeft: number;
-      /**
-       * @description Of its latest attempt at this stage.
-       * @enum {string|null}
-       */
-      latestVerdict: 'aborted' | 'fail' | 'notProven' | 'pass' | 'unjudged' | null;
-      priorStage: string | null;
-      /** @description Null when there is no prior stage. */
-      priorStagePassed: boolean | null;
-      lotHeld: boolean;
-    };
-    UnitStageDto: {
-      stage: string;
-      maxAttempts: number;
-      /**
-       * @description Of the latest attempt; null when there is none.
-       * @enum {string|null}
-       */
-      verdict: 'aborted' | 'fail' | 'notProven' | 'pass' | 'unjudged' | null;
-      /** @description All results, the oldest first, golden and practice ones included. */
-      results: components['schemas']['RunItemDto'][];
-    };
-    UnitStageStateDto: {
-      stage: string;
-      /** @description Counted results so far. */
-      attempts: number;
-      /**
-       * @description Of the latest attempt; null when there is none.
-       * @enum {string|null}
-       */
-      verdict: 'aborted' | 'fail' | 'notProven' | 'pass' | 'unjudged' | null;
-    };
-    UpdateUserDto: {
-      /** @example productionEngineer */
-      role?: components['schemas']['Role'];
-      /** @example Tomasz Reed-Hale */
-      displayName?: string;
-      /** @description False disables the account and ends its sessions at once. */
-      active?: boolean;
-      /**
-       * @description A new password; ends the account's sessions. At least 12 characters, at most 72 bytes.
-       * @example seven amber cascodes
-       */
-      password?: string;
-    };
-    UserDto: {
-      /** @example qualityLead */
-      role: components['schemas']['Role'];
-      /** @example 3 */
-      userId: number;
-      /**
-       * @description What the person signs in with, in lower case.
-       * @example rosalind.hart@fernhollow.example
-       */
-      email: string;
-      /** @example Rosalind Hart */
-      displayName: string;
-      /** @description A disabled account can't sign in; its name stays in the records. */
-      active: boolean;
-      /** @example 2026-11-02T07:30:00.000Z */
-      createdAt: string;
-      /**
-       * @description Null until the first time.
-       * @example 2026-11-30T06:02:11.000Z
-       */
-      lastSignInAt: string | null;
-    };
-    YieldBucketDto: {
-      firstPass: components['schemas']['YieldDto'];
-      final: components['schemas']['YieldDto'];
-      /** @description Units whose first attempt failed. */
-      failed: number;
-      /** @description Units whose first attempt could not be told. */
-      notProven: number;
-      /** @description Units that have not passed yet and may be tested again. */
-      openUnits: number;
-      startAt: string;
-      endAt: string;
-      /** @description Product of the stages' first-pass yields; only of a single product and all its stages. */
-      rolledThroughput: components['schemas']['YieldDto'] | null;
-    };
-    YieldDto: {
-      passed: number;
-      total: number;
-      share: number | null;
-      low: number | null;
-      high: number | null;
-    };
-    YieldGroupDto: {
-      firstPass: components['schemas']['YieldDto'];
-      final: components['schemas']['YieldDto'];
-      /** @description Units whose first attempt failed. */
-      failed: number;
-      /** @description Units whose first attempt could not be told. */
-      notProven: number;
-      /** @description Units that have not passed yet and may be tested again. */
-      openUnits: number;
-      /** @description Null where the first attempt didn't say. */
-      name: string | null;
-      buckets: components['schemas']['YieldDto'][];
-    };
-    YieldMarkerDto: {
-      at: string;
-      /** @enum {string} */
-      kind: 'limitSet' | 'program' | 'testPlan';
-      text: string;
-    };
-    YieldReportDto: {
-      from: string;
-      to: string;
-      /** @enum {string} */
-      by: 'day' | 'hour' | 'week';
-      timeZone: string;
-      whole: components['schemas']['CohortDto'];
-      rolledThroughput: components['schemas']['YieldDto'] | null;
-      buckets: components['schemas']['YieldBucketDto'][];
-      /** @description Empty without a split; the largest first. */
-      groups: components['schemas']['YieldGroupDto'][];
-      failingMeasures: components['schemas']['FailingMeasureDto'][];
-      retests: components['schemas']['RetestsDto'];
-      aborts: components['schemas']['AbortsDto'];
-      markers: components['schemas']['YieldMarkerDto'][];
-    };
-  };
-  responses: never;
-  parameters: never;
-  requestBodies: never;
-  headers: never;
-  pathItems: never;
+    responses: never;
+    parameters: never;
+    requestBodies: never;
+    headers: never;
+    pathItems: never;
 }
 export type $defs = Record<string, never>;
 export interface operations {
-  Live_follow: {
-    parameters: {
-      query?: never;
-      header?: never;
-      path?: never;
-      cookie?: never;
-    };
-    requestBody?: never;
-    responses: {
-      /** @description The `data` of each event. */
-      200: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'text/event-stream': components['schemas']['LiveEventDto'];
-        };
-      };
-      /** @description Not signed in, or no known API key */
-      401: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/problem+json': components['schemas']['ProblemDto'];
-        };
-      };
-      /** @description Not allowed */
-      403: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/problem+json': components['schemas']['ProblemDto'];
-        };
-      };
-      /** @description Too many requests; wait as `Retry-After` says */
-      429: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/problem+json': components['schemas']['ProblemDto'];
-        };
-      };
-    };
-  };
-  Audit_page: {
-    parameters: {
-      query?: {
-        /** @description From an earlier page's `nextCursor`; left out for the newest. */
-        cursor?: string;
-        /** @description Items per page. */
-        limit?: number;
-      };
-      header?: never;
-      path?: never;
-      cookie?: never;
-    };
-    requestBody?: never;
-    responses: {
-      200: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/json': components['schemas']['AuditPageDto'];
-        };
-      };
-      /** @description Not signed in, or no known API key */
-      401: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/problem+json': components['schemas']['ProblemDto'];
-        };
-      };
-      /** @description Not allowed */
-      403: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/problem+json': components['schemas']['ProblemDto'];
-        };
-      };
-      /** @description Readable, but not valid; see `errors` */
-      422: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/problem+json': components['schemas']['ProblemDto'];
-        };
-      };
-      /** @description Too many requests; wait as `Retry-After` says */
-      429: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/problem+json': components['schemas']['ProblemDto'];
+    Live_follow: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            /** @description The `data` of each event. */
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "text/event-stream": components["schemas"]["LiveEventDto"];
+                };
+            };
+            /** @description Not signed in, or no known API key */
+            401: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+            /** @description Not allowed */
+            403: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+            /** @description Too many requests; wait as `Retry-After` says */
+            429: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
+    };
+    Audit_page: {
+        parameters: {
+            query?: {
+                /** @description From an earlier page's `nextCursor`; left out for the newest. */
+                cursor?: string;
+                /** @description Items per page. */
+                limit?: number;
+            };
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["AuditPageDto"];
+                };
+            };
+            /** @description Not signed in, or no known API key */
+            401: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+            /** @description Not allowed */
+            403: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+            /** @description Readable, but not valid; see `errors` */
+            422: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+            /** @description Too many requests; wait as `Retry-After` says */
+            429: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
+    };
+    Rights_list: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["RightDto"][];
+                };
+            };
+            /** @description Not signed in, or no known API key */
+            401: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+            /** @description Not allowed */
+            403: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+            /** @description Too many requests; wait as `Retry-After` says */
+            429: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
+    };
+    Session_current: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["SessionDto"];
+                };
+            };
+            /** @description Not signed in, or no known API key */
+            401: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+            /** @description Not allowed */
+            403: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+            /** @description Too many requests; wait as `Retry-After` says */
+            429: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
+    };
+    Session_signIn: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": components["schemas"]["SignInDto"];
+            };
+        };
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["SessionDto"];
+                };
+            };
+            /** @description Not readable as what it should be */
+            400: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+            /** @description Not signed in, or no known API key */
+            401: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+            /** @description Not allowed */
+            403: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+            /** @description Too large */
+            413: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+            /** @description Content type not read here */
+            415: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+            /** @description Readable, but not valid; see `errors` */
+            422: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+            /** @description Too many requests; wait as `Retry-After` says */
+            429: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+            /** @description Can't be stored now; send again as `Retry-After` says */
+            503: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
+    };
+    Session_signOut: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            /** @description Signed out */
+            204: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description Not signed in, or no known API key */
+            401: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+            /** @description Not allowed */
+            403: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+            /** @description Too many requests; wait as `Retry-After` says */
+            429: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+            /** @description Can't be stored now; send again as `Retry-After` says */
+            503: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
+    };
+    Session_changePassword: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": components["schemas"]["ChangePasswordDto"];
+            };
+        };
+        responses: {
+            /** @description Changed */
+            204: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description Not readable as what it should be */
+            400: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+            /** @description Not signed in, or no known API key */
+            401: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+            /** @description Not allowed */
+            403: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+            /** @description Too large */
+            413: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+            /** @description Content type not read here */
+            415: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+            /** @description Readable, but not valid; see `errors` */
+            422: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+            /** @description Too many requests; wait as `Retry-After` says */
+            429: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+            /** @description Can't be stored now; send again as `Retry-After` says */
+            503: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
+    };
+    Users_list: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["UserDto"][];
+                };
+            };
+            /** @description Not signed in, or no known API key */
+            401: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+            /** @description Not allowed */
+            403: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+            /** @description Too many requests; wait as `Retry-After` says */
+            429: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
+    };
+    Users_create: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": components["schemas"]["CreateUserDto"];
+            };
+        };
+        responses: {
+            201: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["UserDto"];
+                };
+            };
+            /** @description Not readable as what it should be */
+            400: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+            /** @description Not signed in, or no known API key */
+            401: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+            /** @description Not allowed */
+            403: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+            /** @description In conflict with what is stored */
+            409: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+            /** @description Too large */
+            413: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+            /** @description Content type not read here */
+            415: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+            /** @description Readable, but not valid; see `errors` */
+            422: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+            /** @description Too many requests; wait as `Retry-After` says */
+            429: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+            /** @description Can't be stored now; send again as `Retry-After` says */
+            503: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
+    };
+    Users_update: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                userId: number;
+            };
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": components["schemas"]["UpdateUserDto"];
+            };
+        };
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["UserDto"];
+                };
+            };
+            /** @description Not readable as what it should be */
+            400: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+            /** @description Not signed in, or no known API key */
+            401: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+            /** @description Not allowed */
+            403: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+            /** @description Doesn't exist */
+            404: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+            /** @description In conflict with what is stored */
+            409: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+            /** @description Too large */
+            413: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+            /** @description Content type not read here */
+            415: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+            /** @description Readable, but not valid; see `errors` */
+            422: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+            /** @description Too many requests; wait as `Retry-After` says */
+            429: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+            /** @description Can't be stored now; send again as `Retry-After` says */
+            503: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
+    };
+    Products_list: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["ProductDto"][];
+                };
+            };
+            /** @description Not signed in, or no known API key */
+            401: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+            /** @description Not allowed */
+            403: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+            /** @description Too many requests; wait as `Retry-After` says */
+            429: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
+    };
+    Stations_list: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["StationDto"][];
+                };
+            };
+            /** @description Not signed in, or no known API key */
+            401: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+            /** @description Not allowed */
+            403: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+            /** @description Too many requests; wait as `Retry-After` says */
+            429: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
+    };
+    Stations_create: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": components["schemas"]["CreateStationDto"];
+            };
+        };
+        responses: {
+            201: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["StationDto"];
+                };
+            };
+            /** @description Not readable as what it should be */
+            400: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+            /** @description Not signed in, or no known API key */
+            401: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+            /** @description Not allowed */
+            403: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+            /** @description In conflict with what is stored */
+            409: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+            /** @description Too large */
+            413: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+            /** @description Content type not read here */
+            415: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+            /** @description Readable, but not valid; see `errors` */
+            422: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+            /** @description Too many requests; wait as `Retry-After` says */
+            429: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+            /** @description Can't be stored now; send again as `Retry-After` says */
+            503: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
+    };
+    TestPlans_current: {
+        parameters: {
+            query: {
+                partNumber: string;
+                stage: string;
+            };
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["CurrentPlanDto"];
+                };
+            };
+            /** @description Not signed in, or no known API key */
+            401: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+            /** @description Not allowed */
+            403: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+            /** @description Doesn't exist */
+            404: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+            /** @description Readable, but not valid; see `errors` */
+            422: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+            /** @description Too many requests; wait as `Retry-After` says */
+            429: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
+    };
+    Heartbeats_beat: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": components["schemas"]["PostHeartbeatDto"];
+            };
+        };
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["HeartbeatDto"];
+                };
+            };
+            /** @description Not readable as what it should be */
+            400: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+            /** @description Not signed in, or no known API key */
+            401: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+            /** @description Not allowed */
+            403: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+            /** @description Too large */
+            413: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+            /** @description Content type not read here */
+            415: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+            /** @description Readable, but not valid; see `errors` */
+            422: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+            /** @description Too many requests; wait as `Retry-After` says */
+            429: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+            /** @description Can't be stored now; send again as `Retry-After` says */
+            503: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
+    };
+    ApiKeys_list: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                station: string;
+            };
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["ApiKeyDto"][];
+                };
+            };
+            /** @description Not readable as what it should be */
+            400: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+            /** @description Not signed in, or no known API key */
+            401: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+            /** @description Not allowed */
+            403: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+            /** @description Doesn't exist */
+            404: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+            /** @description Too many requests; wait as `Retry-After` says */
+            429: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
+    };
+    ApiKeys_create: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                station: string;
+            };
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": components["schemas"]["CreateApiKeyDto"];
+            };
+        };
+        responses: {
+            201: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["CreatedApiKeyDto"];
+                };
+            };
+            /** @description Not readable as what it should be */
+            400: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+            /** @description Not signed in, or no known API key */
+            401: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+            /** @description Not allowed */
+            403: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+            /** @description Doesn't exist */
+            404: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+            /** @description Too large */
+            413: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+            /** @description Content type not read here */
+            415: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+            /** @description Readable, but not valid; see `errors` */
+            422: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+            /** @description Too many requests; wait as `Retry-After` says */
+            429: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+            /** @description Can't be stored now; send again as `Retry-After` says */
+            503: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
+    };
+    ApiKeys_revoke: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                station: string;
+                keyId: number;
+            };
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["ApiKeyDto"];
+                };
+            };
+            /** @description Not readable as what it should be */
+            400: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+            /** @description Not signed in, or no known API key */
+            401: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+            /** @description Not allowed */
+            403: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+            /** @description Doesn't exist */
+            404: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+            /** @description Too many requests; wait as `Retry-After` says */
+            429: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+            /** @description Can't be stored now; send again as `Retry-After` says */
+            503: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
+    };
+    LocalMailbox_list: {
+        parameters: {
+            query?: {
+                /** @description Only mails to this address. */
+                to?: string;
+            };
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["MailboxPageDto"];
+                };
+            };
+            /** @description Not signed in, or no known API key */
+            401: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+            /** @description Not allowed */
+            403: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+            /** @description Doesn't exist */
+            404: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+            /** @description Readable, but not valid; see `errors` */
+            422: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+            /** @description Too many requests; wait as `Retry-After` says */
+            429: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
+    };
+    LocalMailbox_find: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                mailId: string;
+            };
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["MailboxMailDto"];
+                };
+            };
+            /** @description Not readable as what it should be */
+            400: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+            /** @description Not signed in, or no known API key */
+            401: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+            /** @description Not allowed */
+            403: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+            /** @description Doesn't exist */
+            404: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+            /** @description Too many requests; wait as `Retry-After` says */
+            429: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
+    };
+    Breaches_list: {
+        parameters: {
+            query?: {
+                /** @description From an earlier page's `nextCursor`; left out for the newest. */
+                cursor?: string;
+                /** @description Items per page. */
+                limit?: number;
+                /** @description Left out: all. */
+                state?: "acknowledged" | "all" | "closed" | "open";
+            };
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["BreachPageDto"];
+                };
+            };
+            /** @description Not signed in, or no known API key */
+            401: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+            /** @description Not allowed */
+            403: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+            /** @description Readable, but not valid; see `errors` */
+            422: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+            /** @description Too many requests; wait as `Retry-After` says */
+            429: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
+    };
+    Breaches_detail: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                breachId: number;
+            };
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["BreachDetailDto"];
+                };
+            };
+            /** @description Not readable as what it should be */
+            400: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+            /** @description Not signed in, or no known API key */
+            401: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+            /** @description Not allowed */
+            403: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+            /** @description Doesn't exist */
+            404: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+            /** @description Too many requests; wait as `Retry-After` says */
+            429: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
+    };
+    Breaches_acknowledge: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                breachId: number;
+            };
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": components["schemas"]["AcknowledgeBreachDto"];
+            };
+        };
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["BreachDetailDto"];
+                };
+            };
+            /** @description Not readable as what it should be */
+            400: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+            /** @description Not signed in, or no known API key */
+            401: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+            /** @description Not allowed */
+            403: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+            /** @description Doesn't exist */
+            404: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+            /** @description In conflict with what is stored */
+            409: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+            /** @description Too large */
+            413: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+            /** @description Content type not read here */
+            415: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+            /** @description Readable, but not valid; see `errors` */
+            422: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+            /** @description Too many requests; wait as `Retry-After` says */
+            429: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+            /** @description Can't be stored now; send again as `Retry-After` says */
+            503: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
+    };
+    Breaches_close: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                breachId: number;
+            };
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": components["schemas"]["CloseBreachDto"];
+            };
+        };
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["BreachDetailDto"];
+                };
+            };
+            /** @description Not readable as what it should be */
+            400: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+            /** @description Not signed in, or no known API key */
+            401: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+            /** @description Not allowed */
+            403: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+            /** @description Doesn't exist */
+            404: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+            /** @description In conflict with what is stored */
+            409: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+            /** @description Too large */
+            413: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+            /** @description Content type not read here */
+            415: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+            /** @description Readable, but not valid; see `errors` */
+            422: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+            /** @description Too many requests; wait as `Retry-After` says */
+            429: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+            /** @description Can't be stored now; send again as `Retry-After` says */
+            503: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
+    };
+    Intake_list: {
+        parameters: {
+            query?: {
+                /** @description From an earlier page's `nextCursor`; left out for the newest. */
+                cursor?: string;
+                /** @description Items per page. */
+                limit?: number;
+                kind?: "accepted" | "all" | "refused";
+                station?: string;
+            };
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["IntakePageDto"];
+                };
+            };
+            /** @description Not signed in, or no known API key */
+            401: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+            /** @description Not allowed */
+            403: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+            /** @description Readable, but not valid; see `errors` */
+            422: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+            /** @description Too many requests; wait as `Retry-After` says */
+            429: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
+    };
+    Intake_refused: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                intakeId: string;
+            };
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["RefusedPostDto"];
+                };
+            };
+            /** @description Not readable as what it should be */
+            400: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+            /** @description Not signed in, or no known API key */
+            401: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+            /** @description Not allowed */
+            403: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+            /** @description Doesn't exist */
+            404: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+            /** @description Too many requests; wait as `Retry-After` says */
+            429: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
+    };
+    Results_list: {
+        parameters: {
+            query?: {
+                /** @description From an earlier page's `nextCursor`; left out for the newest. */
+                cursor?: string;
+                /** @description Items per page. */
+                limit?: number;
+                partNumber?: string;
+                serialNumber?: string;
+                stage?: string;
+                station?: string;
+                lot?: string;
+                verdict?: "aborted" | "fail" | "notProven" | "pass" | "unjudged";
+                runKind?: "golden" | "practice" | "production" | "study";
+            };
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["ResultPageDto"];
+                };
+            };
+            /** @description Not signed in, or no known API key */
+            401: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+            /** @description Not allowed */
+            403: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+            /** @description Readable, but not valid; see `errors` */
+            422: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+            /** @description Too many requests; wait as `Retry-After` says */
+            429: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
+    };
+    Results_record: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": components["schemas"]["PostedResult"];
+            };
+        };
+        responses: {
+            /** @description Stored before; the first answer again */
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["ResultAnswerDto"];
+                };
+            };
+            /** @description Stored and judged */
+            201: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["ResultAnswerDto"];
+                };
+            };
+            /** @description Not readable as what it should be */
+            400: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+            /** @description Not signed in, or no known API key */
+            401: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+            /** @description Not allowed */
+            403: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+            /** @description Doesn't exist */
+            404: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+            /** @description In conflict with what is stored */
+            409: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+            /** @description Too large */
+            413: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+            /** @description Content type not read here */
+            415: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+            /** @description Readable, but not valid; see `errors` */
+            422: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+            /** @description Too many requests; wait as `Retry-After` says */
+            429: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+            /** @description Can't be stored now; send again as `Retry-After` says */
+            503: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
+    };
+    Results_detail: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                resultId: string;
+            };
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["ResultDetailDto"];
+                };
+            };
+            /** @description Not readable as what it should be */
+            400: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+            /** @description Not signed in, or no known API key */
+            401: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+            /** @description Not allowed */
+            403: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+            /** @description Doesn't exist */
+            404: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+            /** @description Too many requests; wait as `Retry-After` says */
+            429: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
+    };
+    Results_rawPost: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                resultId: string;
+            };
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            /** @description The stored bytes */
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["PostedResult"];
+                };
+            };
+            /** @description Not readable as what it should be */
+            400: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+            /** @description Not signed in, or no known API key */
+            401: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+            /** @description Not allowed */
+            403: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+            /** @description Doesn't exist */
+            404: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+            /** @description Too many requests; wait as `Retry-After` says */
+            429: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
+    };
+    Units_list: {
+        parameters: {
+            query?: {
+                /** @description From an earlier page's `nextCursor`; left out for the newest. */
+                cursor?: string;
+                /** @description Items per page. */
+                limit?: number;
+                /** @description Beginning of a serial number, in any case. */
+                search?: string;
+                partNumber?: string;
+                lot?: string;
+                /**
+                 * @description Which of a unit's results the filters below are about: its latest, or its first counted attempt at a stage, by
+                 *     which yields are counted.
+                 */
+                of?: "firstAttempt" | "latest";
+                /** @description First site day on which the result started. */
+                from?: string;
+                /** @description Last site day on which the result started, itself included. */
+                to?: string;
+                stage?: string;
+                station?: string;
+                fixture?: string;
+                programVersion?: string;
+                verdict?: "aborted" | "fail" | "notProven" | "pass" | "unjudged";
+                /** @description A measure that the result failed. */
+                failedMeasure?: string;
+            };
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["UnitPageDto"];
+                };
+            };
+            /** @description Not signed in, or no known API key */
+            401: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+            /** @description Not allowed */
+            403: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+            /** @description Readable, but not valid; see `errors` */
+            422: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+            /** @description Too many requests; wait as `Retry-After` says */
+            429: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
+    };
+    Units_one: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                partNumber: string;
+                serialNumber: string;
+            };
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["UnitDto"];
+                };
+            };
+            /** @description Not readable as what it should be */
+            400: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+            /** @description Not signed in, or no known API key */
+            401: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+            /** @description Not allowed */
+            403: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+            /** @description Doesn't exist */
+            404: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+            /** @description Too many requests; wait as `Retry-After` says */
+            429: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
+    };
+    Units_route: {
+        parameters: {
+            query: {
+                /** @description Where the unit stands. */
+                stage: string;
+            };
+            header?: never;
+            path: {
+                partNumber: string;
+                serialNumber: string;
+            };
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["UnitRouteDto"];
+                };
+            };
+            /** @description Not readable as what it should be */
+            400: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+            /** @description Not signed in, or no known API key */
+            401: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+            /** @description Not allowed */
+            403: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+            /** @description Doesn't exist */
+            404: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+            /** @description Readable, but not valid; see `errors` */
+            422: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+            /** @description Too many requests; wait as `Retry-After` says */
+            429: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
+    };
+    Today_today: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["TodayDto"];
+                };
+            };
+            /** @description Not signed in, or no known API key */
+            401: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+            /** @description Not allowed */
+            403: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+            /** @description Too many requests; wait as `Retry-After` says */
+            429: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
+    };
+    Yield_report: {
+        parameters: {
+            query: {
+                /** @description First site day. */
+                from: string;
+                /** @description Last site day, itself included. */
+                to: string;
+                /** @description Width of a step of the trend. */
+                by?: "day" | "hour" | "week";
+                /** @description What the cohort is split by, besides. */
+                split?: "fixture" | "lot" | "product" | "programVersion" | "stage" | "station";
+                partNumber?: string;
+                stage?: string;
+                station?: string;
+                fixture?: string;
+                lot?: string;
+                programVersion?: string;
+            };
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["YieldReportDto"];
+                };
+            };
+            /** @description Not signed in, or no known API key */
+            401: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+            /** @description Not allowed */
+            403: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+            /** @description Readable, but not valid; see `errors` */
+            422: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+            /** @description Too many requests; wait as `Retry-After` says */
+            429: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
+    };
+    Proof_prove: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["ProofDto"];
+                };
+            };
+            /** @description Not signed in, or no known API key */
+            401: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+            /** @description Not allowed */
+            403: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+            /** @description Too many requests; wait as `Retry-After` says */
+            429: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
+    };
+    Site_site: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["SiteDto"];
+                };
+            };
+            /** @description Not signed in, or no known API key */
+            401: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+            /** @description Not allowed */
+            403: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+            /** @description Too many requests; wait as `Retry-After` says */
+            429: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
+    };
+    Site_health: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["HealthDto"];
+                };
+            };
+            /** @description Not signed in, or no known API key */
+            401: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+            /** @description Not allowed */
+            403: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+            /** @description Too many requests; wait as `Retry-After` says */
+            429: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+            /** @description Can't be stored now; send again as `Retry-After` says */
+            503: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
         };
-      };
-    };
-  };
-  Rights_list: {
-    parameters: {
-      query?: never;
-      header?: never;
-      path?: never;
-      cookie?: never;
-    };
-    requestBody?: never;
-    responses: {
-      200: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/json': components['schemas']['RightDto'][];
-        };
-      };
-      /** @description Not signed in, or no known API key */
-      401: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/problem+json': components['schemas']['ProblemDto'];
-        };
-      };
-      /** @description Not allowed */
-      403: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/problem+json': components['schemas']['ProblemDto'];
-        };
-      };
-      /** @description Too many requests; wait as `Retry-After` says */
-      429: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/problem+json': components['schemas']['ProblemDto'];
-        };
-      };
-    };
-  };
-  Session_current: {
-    parameters: {
-      query?: never;
-      header?: never;
-      path?: never;
-      cookie?: never;
-    };
-    requestBody?: never;
-    responses: {
-      200: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/json': components['schemas']['SessionDto'];
-        };
-      };
-      /** @description Not signed in, or no known API key */
-      401: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/problem+json': components['schemas']['ProblemDto'];
-        };
-      };
-      /** @description Not allowed */
-      403: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/problem+json': components['schemas']['ProblemDto'];
-        };
-      };
-      /** @description Too many requests; wait as `Retry-After` says */
-      429: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/problem+json': components['schemas']['ProblemDto'];
-        };
-      };
-    };
-  };
-  Session_signIn: {
-    parameters: {
-      query?: never;
-      header?: never;
-      path?: never;
-      cookie?: never;
-    };
-    requestBody: {
-      content: {
-        'application/json': components['schemas']['SignInDto'];
-      };
-    };
-    responses: {
-      200: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/json': components['schemas']['SessionDto'];
-        };
-      };
-      /** @description Not readable as what it should be */
-      400: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/problem+json': components['schemas']['ProblemDto'];
-        };
-      };
-      /** @description Not signed in, or no known API key */
-      401: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/problem+json': components['schemas']['ProblemDto'];
-        };
-      };
-      /** @description Not allowed */
-      403: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/problem+json': components['schemas']['ProblemDto'];
-        };
-      };
-      /** @description Too large */
-      413: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/problem+json': components['schemas']['ProblemDto'];
-        };
-      };
-      /** @description Content type not read here */
-      415: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/problem+json': components['schemas']['ProblemDto'];
-        };
-      };
-      /** @description Readable, but not valid; see `errors` */
-      422: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/problem+json': components['schemas']['ProblemDto'];
-        };
-      };
-      /** @description Too many requests; wait as `Retry-After` says */
-      429: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/problem+json': components['schemas']['ProblemDto'];
-        };
-      };
-      /** @description Can't be stored now; send again as `Retry-After` says */
-      503: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/problem+json': components['schemas']['ProblemDto'];
-        };
-      };
-    };
-  };
-  Session_signOut: {
-    parameters: {
-      query?: never;
-      header?: never;
-      path?: never;
-      cookie?: never;
-    };
-    requestBody?: never;
-    responses: {
-      /** @description Signed out */
-      204: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content?: never;
-      };
-      /** @description Not signed in, or no known API key */
-      401: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/problem+json': components['schemas']['ProblemDto'];
-        };
-      };
-      /** @description Not allowed */
-      403: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/problem+json': components['schemas']['ProblemDto'];
-        };
-      };
-      /** @description Too many requests; wait as `Retry-After` says */
-      429: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/problem+json': components['schemas']['ProblemDto'];
-        };
-      };
-      /** @description Can't be stored now; send again as `Retry-After` says */
-      503: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/problem+json': components['schemas']['ProblemDto'];
-        };
-      };
-    };
-  };
-  Session_changePassword: {
-    parameters: {
-      query?: never;
-      header?: never;
-      path?: never;
-      cookie?: never;
-    };
-    requestBody: {
-      content: {
-        'application/json': components['schemas']['ChangePasswordDto'];
-      };
-    };
-    responses: {
-      /** @description Changed */
-      204: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content?: never;
-      };
-      /** @description Not readable as what it should be */
-      400: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/problem+json': components['schemas']['ProblemDto'];
-        };
-      };
-      /** @description Not signed in, or no known API key */
-      401: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/problem+json': components['schemas']['ProblemDto'];
-        };
-      };
-      /** @description Not allowed */
-      403: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/problem+json': components['schemas']['ProblemDto'];
-        };
-      };
-      /** @description Too large */
-      413: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/problem+json': components['schemas']['ProblemDto'];
-        };
-      };
-      /** @description Content type not read here */
-      415: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/problem+json': components['schemas']['ProblemDto'];
-        };
-      };
-      /** @description Readable, but not valid; see `errors` */
-      422: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/problem+json': components['schemas']['ProblemDto'];
-        };
-      };
-      /** @description Too many requests; wait as `Retry-After` says */
-      429: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/problem+json': components['schemas']['ProblemDto'];
-        };
-      };
-      /** @description Can't be stored now; send again as `Retry-After` says */
-      503: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/problem+json': components['schemas']['ProblemDto'];
-        };
-      };
-    };
-  };
-  Users_list: {
-    parameters: {
-      query?: never;
-      header?: never;
-      path?: never;
-      cookie?: never;
-    };
-    requestBody?: never;
-    responses: {
-      200: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/json': components['schemas']['UserDto'][];
-        };
-      };
-      /** @description Not signed in, or no known API key */
-      401: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/problem+json': components['schemas']['ProblemDto'];
-        };
-      };
-      /** @description Not allowed */
-      403: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/problem+json': components['schemas']['ProblemDto'];
-        };
-      };
-      /** @description Too many requests; wait as `Retry-After` says */
-      429: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/problem+json': components['schemas']['ProblemDto'];
-        };
-      };
-    };
-  };
-  Users_create: {
-    parameters: {
-      query?: never;
-      header?: never;
-      path?: never;
-      cookie?: never;
-    };
-    requestBody: {
-      content: {
-        'application/json': components['schemas']['CreateUserDto'];
-      };
-    };
-    responses: {
-      201: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/json': components['schemas']['UserDto'];
-        };
-      };
-      /** @description Not readable as what it should be */
-      400: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/problem+json': components['schemas']['ProblemDto'];
-        };
-      };
-      /** @description Not signed in, or no known API key */
-      401: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/problem+json': components['schemas']['ProblemDto'];
-        };
-      };
-      /** @description Not allowed */
-      403: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/problem+json': components['schemas']['ProblemDto'];
-        };
-      };
-      /** @description In conflict with what is stored */
-      409: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/problem+json': components['schemas']['ProblemDto'];
-        };
-      };
-      /** @description Too large */
-      413: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/problem+json': components['schemas']['ProblemDto'];
-        };
-      };
-      /** @description Content type not read here */
-      415: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/problem+json': components['schemas']['ProblemDto'];
-        };
-      };
-      /** @description Readable, but not valid; see `errors` */
-      422: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/problem+json': components['schemas']['ProblemDto'];
-        };
-      };
-      /** @description Too many requests; wait as `Retry-After` says */
-      429: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/problem+json': components['schemas']['ProblemDto'];
-        };
-      };
-      /** @description Can't be stored now; send again as `Retry-After` says */
-      503: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/problem+json': components['schemas']['ProblemDto'];
-        };
-      };
-    };
-  };
-  Users_update: {
-    parameters: {
-      query?: never;
-      header?: never;
-      path: {
-        userId: number;
-      };
-      cookie?: never;
-    };
-    requestBody: {
-      content: {
-        'application/json': components['schemas']['UpdateUserDto'];
-      };
-    };
-    responses: {
-      200: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/json': components['schemas']['UserDto'];
-        };
-      };
-      /** @description Not readable as what it should be */
-      400: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/problem+json': components['schemas']['ProblemDto'];
-        };
-      };
-      /** @description Not signed in, or no known API key */
-      401: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/problem+json': components['schemas']['ProblemDto'];
-        };
-      };
-      /** @description Not allowed */
-      403: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/problem+json': components['schemas']['ProblemDto'];
-        };
-      };
-      /** @description Doesn't exist */
-      404: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/problem+json': components['schemas']['ProblemDto'];
-        };
-      };
-      /** @description In conflict with what is stored */
-      409: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/problem+json': components['schemas']['ProblemDto'];
-        };
-      };
-      /** @description Too large */
-      413: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/problem+json': components['schemas']['ProblemDto'];
-        };
-      };
-      /** @description Content type not read here */
-      415: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/problem+json': components['schemas']['ProblemDto'];
-        };
-      };
-      /** @description Readable, but not valid; see `errors` */
-      422: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/problem+json': components['schemas']['ProblemDto'];
-        };
-      };
-      /** @description Too many requests; wait as `Retry-After` says */
-      429: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/problem+json': components['schemas']['ProblemDto'];
-        };
-      };
-      /** @description Can't be stored now; send again as `Retry-After` says */
-      503: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/problem+json': components['schemas']['ProblemDto'];
-        };
-      };
-    };
-  };
-  Products_list: {
-    parameters: {
-      query?: never;
-      header?: never;
-      path?: never;
-      cookie?: never;
-    };
-    requestBody?: never;
-    responses: {
-      200: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/json': components['schemas']['ProductDto'][];
-        };
-      };
-      /** @description Not signed in, or no known API key */
-      401: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/problem+json': components['schemas']['ProblemDto'];
-        };
-      };
-      /** @description Not allowed */
-      403: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/problem+json': components['schemas']['ProblemDto'];
-        };
-      };
-      /** @description Too many requests; wait as `Retry-After` says */
-      429: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/problem+json': components['schemas']['ProblemDto'];
-        };
-      };
-    };
-  };
-  Stations_list: {
-    parameters: {
-      query?: never;
-      header?: never;
-      path?: never;
-      cookie?: never;
-    };
-    requestBody?: never;
-    responses: {
-      200: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/json': components['schemas']['StationDto'][];
-        };
-      };
-      /** @description Not signed in, or no known API key */
-      401: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/problem+json': components['schemas']['ProblemDto'];
-        };
-      };
-      /** @description Not allowed */
-      403: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/problem+json': components['schemas']['ProblemDto'];
-        };
-      };
-      /** @description Too many requests; wait as `Retry-After` says */
-      429: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/problem+json': components['schemas']['ProblemDto'];
-        };
-      };
-    };
-  };
-  Stations_create: {
-    parameters: {
-      query?: never;
-      header?: never;
-      path?: never;
-      cookie?: never;
-    };
-    requestBody: {
-      content: {
-        'application/json': components['schemas']['CreateStationDto'];
-      };
-    };
-    responses: {
-      201: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/json': components['schemas']['StationDto'];
-        };
-      };
-      /** @description Not readable as what it should be */
-      400: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/problem+json': components['schemas']['ProblemDto'];
-        };
-      };
-      /** @description Not signed in, or no known API key */
-      401: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/problem+json': components['schemas']['ProblemDto'];
-        };
-      };
-      /** @description Not allowed */
-      403: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/problem+json': components['schemas']['ProblemDto'];
-        };
-      };
-      /** @description In conflict with what is stored */
-      409: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/problem+json': components['schemas']['ProblemDto'];
-        };
-      };
-      /** @description Too large */
-      413: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/problem+json': components['schemas']['ProblemDto'];
-        };
-      };
-      /** @description Content type not read here */
-      415: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/problem+json': components['schemas']['ProblemDto'];
-        };
-      };
-      /** @description Readable, but not valid; see `errors` */
-      422: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/problem+json': components['schemas']['ProblemDto'];
-        };
-      };
-      /** @description Too many requests; wait as `Retry-After` says */
-      429: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/problem+json': components['schemas']['ProblemDto'];
-        };
-      };
-      /** @description Can't be stored now; send again as `Retry-After` says */
-      503: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/problem+json': components['schemas']['ProblemDto'];
-        };
-      };
-    };
-  };
-  TestPlans_current: {
-    parameters: {
-      query: {
-        partNumber: string;
-        stage: string;
-      };
-      header?: never;
-      path?: never;
-      cookie?: never;
-    };
-    requestBody?: never;
-    responses: {
-      200: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/json': components['schemas']['CurrentPlanDto'];
-        };
-      };
-      /** @description Not signed in, or no known API key */
-      401: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/problem+json': components['schemas']['ProblemDto'];
-        };
-      };
-      /** @description Not allowed */
-      403: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/problem+json': components['schemas']['ProblemDto'];
-        };
-      };
-      /** @description Doesn't exist */
-      404: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/problem+json': components['schemas']['ProblemDto'];
-        };
-      };
-      /** @description Readable, but not valid; see `errors` */
-      422: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/problem+json': components['schemas']['ProblemDto'];
-        };
-      };
-      /** @description Too many requests; wait as `Retry-After` says */
-      429: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/problem+json': components['schemas']['ProblemDto'];
-        };
-      };
-    };
-  };
-  Heartbeats_beat: {
-    parameters: {
-      query?: never;
-      header?: never;
-      path?: never;
-      cookie?: never;
-    };
-    requestBody: {
-      content: {
-        'application/json': components['schemas']['PostHeartbeatDto'];
-      };
-    };
-    responses: {
-      200: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/json': components['schemas']['HeartbeatDto'];
-        };
-      };
-      /** @description Not readable as what it should be */
-      400: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/problem+json': components['schemas']['ProblemDto'];
-        };
-      };
-      /** @description Not signed in, or no known API key */
-      401: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/problem+json': components['schemas']['ProblemDto'];
-        };
-      };
-      /** @description Not allowed */
-      403: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/problem+json': components['schemas']['ProblemDto'];
-        };
-      };
-      /** @description Too large */
-      413: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/problem+json': components['schemas']['ProblemDto'];
-        };
-      };
-      /** @description Content type not read here */
-      415: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/problem+json': components['schemas']['ProblemDto'];
-        };
-      };
-      /** @description Readable, but not valid; see `errors` */
-      422: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/problem+json': components['schemas']['ProblemDto'];
-        };
-      };
-      /** @description Too many requests; wait as `Retry-After` says */
-      429: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/problem+json': components['schemas']['ProblemDto'];
-        };
-      };
-      /** @description Can't be stored now; send again as `Retry-After` says */
-      503: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/problem+json': components['schemas']['ProblemDto'];
-        };
-      };
-    };
-  };
-  ApiKeys_list: {
-    parameters: {
-      query?: never;
-      header?: never;
-      path: {
-        station: string;
-      };
-      cookie?: never;
-    };
-    requestBody?: never;
-    responses: {
-      200: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/json': components['schemas']['ApiKeyDto'][];
-        };
-      };
-      /** @description Not readable as what it should be */
-      400: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/problem+json': components['schemas']['ProblemDto'];
-        };
-      };
-      /** @description Not signed in, or no known API key */
-      401: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/problem+json': components['schemas']['ProblemDto'];
-        };
-      };
-      /** @description Not allowed */
-      403: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/problem+json': components['schemas']['ProblemDto'];
-        };
-      };
-      /** @description Doesn't exist */
-      404: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/problem+json': components['schemas']['ProblemDto'];
-        };
-      };
-      /** @description Too many requests; wait as `Retry-After` says */
-      429: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/problem+json': components['schemas']['ProblemDto'];
-        };
-      };
-    };
-  };
-  ApiKeys_create: {
-    parameters: {
-      query?: never;
-      header?: never;
-      path: {
-        station: string;
-      };
-      cookie?: never;
-    };
-    requestBody: {
-      content: {
-        'application/json': components['schemas']['CreateApiKeyDto'];
-      };
-    };
-    responses: {
-      201: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/json': components['schemas']['CreatedApiKeyDto'];
-        };
-      };
-      /** @description Not readable as what it should be */
-      400: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/problem+json': components['schemas']['ProblemDto'];
-        };
-      };
-      /** @description Not signed in, or no known API key */
-      401: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/problem+json': components['schemas']['ProblemDto'];
-        };
-      };
-      /** @description Not allowed */
-      403: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/problem+json': components['schemas']['ProblemDto'];
-        };
-      };
-      /** @description Doesn't exist */
-      404: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/problem+json': components['schemas']['ProblemDto'];
-        };
-      };
-      /** @description Too large */
-      413: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/problem+json': components['schemas']['ProblemDto'];
-        };
-      };
-      /** @description Content type not read here */
-      415: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/problem+json': components['schemas']['ProblemDto'];
-        };
-      };
-      /** @description Readable, but not valid; see `errors` */
-      422: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/problem+json': components['schemas']['ProblemDto'];
-        };
-      };
-      /** @description Too many requests; wait as `Retry-After` says */
-      429: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/problem+json': components['schemas']['ProblemDto'];
-        };
-      };
-      /** @description Can't be stored now; send again as `Retry-After` says */
-      503: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/problem+json': components['schemas']['ProblemDto'];
-        };
-      };
-    };
-  };
-  ApiKeys_revoke: {
-    parameters: {
-      query?: never;
-      header?: never;
-      path: {
-        station: string;
-        keyId: number;
-      };
-      cookie?: never;
-    };
-    requestBody?: never;
-    responses: {
-      200: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/json': components['schemas']['ApiKeyDto'];
-        };
-      };
-      /** @description Not readable as what it should be */
-      400: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/problem+json': components['schemas']['ProblemDto'];
-        };
-      };
-      /** @description Not signed in, or no known API key */
-      401: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/problem+json': components['schemas']['ProblemDto'];
-        };
-      };
-      /** @description Not allowed */
-      403: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/problem+json': components['schemas']['ProblemDto'];
-        };
-      };
-      /** @description Doesn't exist */
-      404: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/problem+json': components['schemas']['ProblemDto'];
-        };
-      };
-      /** @description Too many requests; wait as `Retry-After` says */
-      429: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/problem+json': components['schemas']['ProblemDto'];
-        };
-      };
-      /** @description Can't be stored now; send again as `Retry-After` says */
-      503: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/problem+json': components['schemas']['ProblemDto'];
-        };
-      };
-    };
-  };
-  LocalMailbox_list: {
-    parameters: {
-      query?: {
-        /** @description Only mails to this address. */
-        to?: string;
-      };
-      header?: never;
-      path?: never;
-      cookie?: never;
-    };
-    requestBody?: never;
-    responses: {
-      200: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/json': components['schemas']['MailboxPageDto'];
-        };
-      };
-      /** @description Not signed in, or no known API key */
-      401: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/problem+json': components['schemas']['ProblemDto'];
-        };
-      };
-      /** @description Not allowed */
-      403: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/problem+json': components['schemas']['ProblemDto'];
-        };
-      };
-      /** @description Doesn't exist */
-      404: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/problem+json': components['schemas']['ProblemDto'];
-        };
-      };
-      /** @description Readable, but not valid; see `errors` */
-      422: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/problem+json': components['schemas']['ProblemDto'];
-        };
-      };
-      /** @description Too many requests; wait as `Retry-After` says */
-      429: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/problem+json': components['schemas']['ProblemDto'];
-        };
-      };
-    };
-  };
-  LocalMailbox_find: {
-    parameters: {
-      query?: never;
-      header?: never;
-      path: {
-        mailId: string;
-      };
-      cookie?: never;
-    };
-    requestBody?: never;
-    responses: {
-      200: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/json': components['schemas']['MailboxMailDto'];
-        };
-      };
-      /** @description Not readable as what it should be */
-      400: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/problem+json': components['schemas']['ProblemDto'];
-        };
-      };
-      /** @description Not signed in, or no known API key */
-      401: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/problem+json': components['schemas']['ProblemDto'];
-        };
-      };
-      /** @description Not allowed */
-      403: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/problem+json': components['schemas']['ProblemDto'];
-        };
-      };
-      /** @description Doesn't exist */
-      404: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/problem+json': components['schemas']['ProblemDto'];
-        };
-      };
-      /** @description Too many requests; wait as `Retry-After` says */
-      429: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/problem+json': components['schemas']['ProblemDto'];
-        };
-      };
-    };
-  };
-  Breaches_list: {
-    parameters: {
-      query?: {
-        /** @description From an earlier page's `nextCursor`; left out for the newest. */
-        cursor?: string;
-        /** @description Items per page. */
-        limit?: number;
-        /** @description Left out: all. */
-        state?: 'acknowledged' | 'all' | 'closed' | 'open';
-      };
-      header?: never;
-      path?: never;
-      cookie?: never;
-    };
-    requestBody?: never;
-    responses: {
-      200: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/json': components['schemas']['BreachPageDto'];
-        };
-      };
-      /** @description Not signed in, or no known API key */
-      401: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/problem+json': components['schemas']['ProblemDto'];
-        };
-      };
-      /** @description Not allowed */
-      403: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/problem+json': components['schemas']['ProblemDto'];
-        };
-      };
-      /** @description Readable, but not valid; see `errors` */
-      422: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/problem+json': components['schemas']['ProblemDto'];
-        };
-      };
-      /** @description Too many requests; wait as `Retry-After` says */
-      429: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/problem+json': components['schemas']['ProblemDto'];
-        };
-      };
-    };
-  };
-  Breaches_detail: {
-    parameters: {
-      query?: never;
-      header?: never;
-      path: {
-        breachId: number;
-      };
-      cookie?: never;
-    };
-    requestBody?: never;
-    responses: {
-      200: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/json': components['schemas']['BreachDetailDto'];
-        };
-      };
-      /** @description Not readable as what it should be */
-      400: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/problem+json': components['schemas']['ProblemDto'];
-        };
-      };
-      /** @description Not signed in, or no known API key */
-      401: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/problem+json': components['schemas']['ProblemDto'];
-        };
-      };
-      /** @description Not allowed */
-      403: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/problem+json': components['schemas']['ProblemDto'];
-        };
-      };
-      /** @description Doesn't exist */
-      404: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/problem+json': components['schemas']['ProblemDto'];
-        };
-      };
-      /** @description Too many requests; wait as `Retry-After` says */
-      429: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/problem+json': components['schemas']['ProblemDto'];
-        };
-      };
-    };
-  };
-  Breaches_acknowledge: {
-    parameters: {
-      query?: never;
-      header?: never;
-      path: {
-        breachId: number;
-      };
-      cookie?: never;
-    };
-    requestBody: {
-      content: {
-        'application/json': components['schemas']['AcknowledgeBreachDto'];
-      };
-    };
-    responses: {
-      200: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/json': components['schemas']['BreachDetailDto'];
-        };
-      };
-      /** @description Not readable as what it should be */
-      400: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/problem+json': components['schemas']['ProblemDto'];
-        };
-      };
-      /** @description Not signed in, or no known API key */
-      401: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/problem+json': components['schemas']['ProblemDto'];
-        };
-      };
-      /** @description Not allowed */
-      403: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/problem+json': components['schemas']['ProblemDto'];
-        };
-      };
-      /** @description Doesn't exist */
-      404: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/problem+json': components['schemas']['ProblemDto'];
-        };
-      };
-      /** @description In conflict with what is stored */
-      409: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/problem+json': components['schemas']['ProblemDto'];
-        };
-      };
-      /** @description Too large */
-      413: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/problem+json': components['schemas']['ProblemDto'];
-        };
-      };
-      /** @description Content type not read here */
-      415: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/problem+json': components['schemas']['ProblemDto'];
-        };
-      };
-      /** @description Readable, but not valid; see `errors` */
-      422: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/problem+json': components['schemas']['ProblemDto'];
-        };
-      };
-      /** @description Too many requests; wait as `Retry-After` says */
-      429: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/problem+json': components['schemas']['ProblemDto'];
-        };
-      };
-      /** @description Can't be stored now; send again as `Retry-After` says */
-      503: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/problem+json': components['schemas']['ProblemDto'];
-        };
-      };
-    };
-  };
-  Breaches_close: {
-    parameters: {
-      query?: never;
-      header?: never;
-      path: {
-        breachId: number;
-      };
-      cookie?: never;
-    };
-    requestBody: {
-      content: {
-        'application/json': components['schemas']['CloseBreachDto'];
-      };
-    };
-    responses: {
-      200: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/json': components['schemas']['BreachDetailDto'];
-        };
-      };
-      /** @description Not readable as what it should be */
-      400: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/problem+json': components['schemas']['ProblemDto'];
-        };
-      };
-      /** @description Not signed in, or no known API key */
-      401: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/problem+json': components['schemas']['ProblemDto'];
-        };
-      };
-      /** @description Not allowed */
-      403: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/problem+json': components['schemas']['ProblemDto'];
-        };
-      };
-      /** @description Doesn't exist */
-      404: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/problem+json': components['schemas']['ProblemDto'];
-        };
-      };
-      /** @description In conflict with what is stored */
-      409: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/problem+json': components['schemas']['ProblemDto'];
-        };
-      };
-      /** @description Too large */
-      413: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/problem+json': components['schemas']['ProblemDto'];
-        };
-      };
-      /** @description Content type not read here */
-      415: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/problem+json': components['schemas']['ProblemDto'];
-        };
-      };
-      /** @description Readable, but not valid; see `errors` */
-      422: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/problem+json': components['schemas']['ProblemDto'];
-        };
-      };
-      /** @description Too many requests; wait as `Retry-After` says */
-      429: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/problem+json': components['schemas']['ProblemDto'];
-        };
-      };
-      /** @description Can't be stored now; send again as `Retry-After` says */
-      503: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/problem+json': components['schemas']['ProblemDto'];
-        };
-      };
-    };
-  };
-  Intake_list: {
-    parameters: {
-      query?: {
-        /** @description From an earlier page's `nextCursor`; left out for the newest. */
-        cursor?: string;
-        /** @description Items per page. */
-        limit?: number;
-        kind?: 'accepted' | 'all' | 'refused';
-        station?: string;
-      };
-      header?: never;
-      path?: never;
-      cookie?: never;
-    };
-    requestBody?: never;
-    responses: {
-      200: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/json': components['schemas']['IntakePageDto'];
-        };
-      };
-      /** @description Not signed in, or no known API key */
-      401: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/problem+json': components['schemas']['ProblemDto'];
-        };
-      };
-      /** @description Not allowed */
-      403: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/problem+json': components['schemas']['ProblemDto'];
-        };
-      };
-      /** @description Readable, but not valid; see `errors` */
-      422: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/problem+json': components['schemas']['ProblemDto'];
-        };
-      };
-      /** @description Too many requests; wait as `Retry-After` says */
-      429: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/problem+json': components['schemas']['ProblemDto'];
-        };
-      };
-    };
-  };
-  Intake_refused: {
-    parameters: {
-      query?: never;
-      header?: never;
-      path: {
-        intakeId: string;
-      };
-      cookie?: never;
-    };
-    requestBody?: never;
-    responses: {
-      200: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/json': components['schemas']['RefusedPostDto'];
-        };
-      };
-      /** @description Not readable as what it should be */
-      400: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/problem+json': components['schemas']['ProblemDto'];
-        };
-      };
-      /** @description Not signed in, or no known API key */
-      401: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/problem+json': components['schemas']['ProblemDto'];
-        };
-      };
-      /** @description Not allowed */
-      403: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/problem+json': components['schemas']['ProblemDto'];
-        };
-      };
-      /** @description Doesn't exist */
-      404: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/problem+json': components['schemas']['ProblemDto'];
-        };
-      };
-      /** @description Too many requests; wait as `Retry-After` says */
-      429: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/problem+json': components['schemas']['ProblemDto'];
-        };
-      };
-    };
-  };
-  Results_list: {
-    parameters: {
-      query?: {
-        /** @description From an earlier page's `nextCursor`; left out for the newest. */
-        cursor?: string;
-        /** @description Items per page. */
-        limit?: number;
-        partNumber?: string;
-        serialNumber?: string;
-        stage?: string;
-        station?: string;
-        lot?: string;
-        verdict?: 'aborted' | 'fail' | 'notProven' | 'pass' | 'unjudged';
-        runKind?: 'golden' | 'practice' | 'production' | 'study';
-      };
-      header?: never;
-      path?: never;
-      cookie?: never;
-    };
-    requestBody?: never;
-    responses: {
-      200: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/json': components['schemas']['ResultPageDto'];
-        };
-      };
-      /** @description Not signed in, or no known API key */
-      401: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/problem+json': components['schemas']['ProblemDto'];
-        };
-      };
-      /** @description Not allowed */
-      403: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/problem+json': components['schemas']['ProblemDto'];
-        };
-      };
-      /** @description Readable, but not valid; see `errors` */
-      422: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/problem+json': components['schemas']['ProblemDto'];
-        };
-      };
-      /** @description Too many requests; wait as `Retry-After` says */
-      429: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/problem+json': components['schemas']['ProblemDto'];
-        };
-      };
-    };
-  };
-  Results_record: {
-    parameters: {
-      query?: never;
-      header?: never;
-      path?: never;
-      cookie?: never;
-    };
-    requestBody: {
-      content: {
-        'application/json': components['schemas']['PostedResult'];
-      };
-    };
-    responses: {
-      /** @description Stored before; the first answer again */
-      200: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/json': components['schemas']['ResultAnswerDto'];
-        };
-      };
-      /** @description Stored and judged */
-      201: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/json': components['schemas']['ResultAnswerDto'];
-        };
-      };
-      /** @description Not readable as what it should be */
-      400: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/problem+json': components['schemas']['ProblemDto'];
-        };
-      };
-      /** @description Not signed in, or no known API key */
-      401: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/problem+json': components['schemas']['ProblemDto'];
-        };
-      };
-      /** @description Not allowed */
-      403: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/problem+json': components['schemas']['ProblemDto'];
-        };
-      };
-      /** @description Doesn't exist */
-      404: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/problem+json': components['schemas']['ProblemDto'];
-        };
-      };
-      /** @description In conflict with what is stored */
-      409: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/problem+json': components['schemas']['ProblemDto'];
-        };
-      };
-      /** @description Too large */
-      413: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/problem+json': components['schemas']['ProblemDto'];
-        };
-      };
-      /** @description Content type not read here */
-      415: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/problem+json': components['schemas']['ProblemDto'];
-        };
-      };
-      /** @description Readable, but not valid; see `errors` */
-      422: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/problem+json': components['schemas']['ProblemDto'];
-        };
-      };
-      /** @description Too many requests; wait as `Retry-After` says */
-      429: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/problem+json': components['schemas']['ProblemDto'];
-        };
-      };
-      /** @description Can't be stored now; send again as `Retry-After` says */
-      503: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/problem+json': components['schemas']['ProblemDto'];
-        };
-      };
-    };
-  };
-  Results_detail: {
-    parameters: {
-      query?: never;
-      header?: never;
-      path: {
-        resultId: string;
-      };
-      cookie?: never;
-    };
-    requestBody?: never;
-    responses: {
-      200: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/json': components['schemas']['ResultDetailDto'];
-        };
-      };
-      /** @description Not readable as what it should be */
-      400: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/problem+json': components['schemas']['ProblemDto'];
-        };
-      };
-      /** @description Not signed in, or no known API key */
-      401: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/problem+json': components['schemas']['ProblemDto'];
-        };
-      };
-      /** @description Not allowed */
-      403: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/problem+json': components['schemas']['ProblemDto'];
-        };
-      };
-      /** @description Doesn't exist */
-      404: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/problem+json': components['schemas']['ProblemDto'];
-        };
-      };
-      /** @description Too many requests; wait as `Retry-After` says */
-      429: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/problem+json': components['schemas']['ProblemDto'];
-        };
-      };
-    };
-  };
-  Results_rawPost: {
-    parameters: {
-      query?: never;
-      header?: never;
-      path: {
-        resultId: string;
-      };
-      cookie?: never;
-    };
-    requestBody?: never;
-    responses: {
-      /** @description The stored bytes */
-      200: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/json': components['schemas']['PostedResult'];
-        };
-      };
-      /** @description Not readable as what it should be */
-      400: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/problem+json': components['schemas']['ProblemDto'];
-        };
-      };
-      /** @description Not signed in, or no known API key */
-      401: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/problem+json': components['schemas']['ProblemDto'];
-        };
-      };
-      /** @description Not allowed */
-      403: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/problem+json': components['schemas']['ProblemDto'];
-        };
-      };
-      /** @description Doesn't exist */
-      404: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/problem+json': components['schemas']['ProblemDto'];
-        };
-      };
-      /** @description Too many requests; wait as `Retry-After` says */
-      429: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/problem+json': components['schemas']['ProblemDto'];
-        };
-      };
-    };
-  };
-  Units_list: {
-    parameters: {
-      query?: {
-        /** @description From an earlier page's `nextCursor`; left out for the newest. */
-        cursor?: string;
-        /** @description Items per page. */
-        limit?: number;
-        /** @description Beginning of a serial number, in any case. */
-        search?: string;
-        partNumber?: string;
-        lot?: string;
-        /**
-         * @description Which of a unit's results the filters below are about: its latest, or its first counted attempt at a stage, by
-         *     which yields are counted.
-         */
-        of?: 'firstAttempt' | 'latest';
-        /** @description First site day on which the result started. */
-        from?: string;
-        /** @description Last site day on which the result started, itself included. */
-        to?: string;
-        stage?: string;
-        station?: string;
-        fixture?: string;
-        programVersion?: string;
-        verdict?: 'aborted' | 'fail' | 'notProven' | 'pass' | 'unjudged';
-        /** @description A measure that the result failed. */
-        failedMeasure?: string;
-      };
-      header?: never;
-      path?: never;
-      cookie?: never;
-    };
-    requestBody?: never;
-    responses: {
-      200: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/json': components['schemas']['UnitPageDto'];
-        };
-      };
-      /** @description Not signed in, or no known API key */
-      401: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/problem+json': components['schemas']['ProblemDto'];
-        };
-      };
-      /** @description Not allowed */
-      403: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/problem+json': components['schemas']['ProblemDto'];
-        };
-      };
-      /** @description Readable, but not valid; see `errors` */
-      422: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/problem+json': components['schemas']['ProblemDto'];
-        };
-      };
-      /** @description Too many requests; wait as `Retry-After` says */
-      429: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/problem+json': components['schemas']['ProblemDto'];
-        };
-      };
-    };
-  };
-  Units_one: {
-    parameters: {
-      query?: never;
-      header?: never;
-      path: {
-        partNumber: string;
-        serialNumber: string;
-      };
-      cookie?: never;
-    };
-    requestBody?: never;
-    responses: {
-      200: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/json': components['schemas']['UnitDto'];
-        };
-      };
-      /** @description Not readable as what it should be */
-      400: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/problem+json': components['schemas']['ProblemDto'];
-        };
-      };
-      /** @description Not signed in, or no known API key */
-      401: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/problem+json': components['schemas']['ProblemDto'];
-        };
-      };
-      /** @description Not allowed */
-      403: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/problem+json': components['schemas']['ProblemDto'];
-        };
-      };
-      /** @description Doesn't exist */
-      404: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/problem+json': components['schemas']['ProblemDto'];
-        };
-      };
-      /** @description Too many requests; wait as `Retry-After` says */
-      429: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/problem+json': components['schemas']['ProblemDto'];
-        };
-      };
-    };
-  };
-  Units_route: {
-    parameters: {
-      query: {
-        /** @description Where the unit stands. */
-        stage: string;
-      };
-      header?: never;
-      path: {
-        partNumber: string;
-        serialNumber: string;
-      };
-      cookie?: never;
-    };
-    requestBody?: never;
-    responses: {
-      200: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/json': components['schemas']['UnitRouteDto'];
-        };
-      };
-      /** @description Not readable as what it should be */
-      400: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/problem+json': components['schemas']['ProblemDto'];
-        };
-      };
-      /** @description Not signed in, or no known API key */
-      401: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/problem+json': components['schemas']['ProblemDto'];
-        };
-      };
-      /** @description Not allowed */
-      403: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/problem+json': components['schemas']['ProblemDto'];
-        };
-      };
-      /** @description Doesn't exist */
-      404: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/problem+json': components['schemas']['ProblemDto'];
-        };
-      };
-      /** @description Readable, but not valid; see `errors` */
-      422: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/problem+json': components['schemas']['ProblemDto'];
-        };
-      };
-      /** @description Too many requests; wait as `Retry-After` says */
-      429: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/problem+json': components['schemas']['ProblemDto'];
-        };
-      };
-    };
-  };
-  Today_today: {
-    parameters: {
-      query?: never;
-      header?: never;
-      path?: never;
-      cookie?: never;
-    };
-    requestBody?: never;
-    responses: {
-      200: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/json': components['schemas']['TodayDto'];
-        };
-      };
-      /** @description Not signed in, or no known API key */
-      401: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/problem+json': components['schemas']['ProblemDto'];
-        };
-      };
-      /** @description Not allowed */
-      403: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/problem+json': components['schemas']['ProblemDto'];
-        };
-      };
-      /** @description Too many requests; wait as `Retry-After` says */
-      429: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/problem+json': components['schemas']['ProblemDto'];
-        };
-      };
-    };
-  };
-  Yield_report: {
-    parameters: {
-      query: {
-        /** @description First site day. */
-        from: string;
-        /** @description Last site day, itself included. */
-        to: string;
-        /** @description Width of a step of the trend. */
-        by?: 'day' | 'hour' | 'week';
-        /** @description What the cohort is split by, besides. */
-        split?: 'fixture' | 'lot' | 'product' | 'programVersion' | 'stage' | 'station';
-        partNumber?: string;
-        stage?: string;
-        station?: string;
-        fixture?: string;
-        lot?: string;
-        programVersion?: string;
-      };
-      header?: never;
-      path?: never;
-      cookie?: never;
-    };
-    requestBody?: never;
-    responses: {
-      200: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/json': components['schemas']['YieldReportDto'];
-        };
-      };
-      /** @description Not signed in, or no known API key */
-      401: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/problem+json': components['schemas']['ProblemDto'];
-        };
-      };
-      /** @description Not allowed */
-      403: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/problem+json': components['schemas']['ProblemDto'];
-        };
-      };
-      /** @description Readable, but not valid; see `errors` */
-      422: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/problem+json': components['schemas']['ProblemDto'];
-        };
-      };
-      /** @description Too many requests; wait as `Retry-After` says */
-      429: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/problem+json': components['schemas']['ProblemDto'];
-        };
-      };
-    };
-  };
-  Proof_prove: {
-    parameters: {
-      query?: never;
-      header?: never;
-      path?: never;
-      cookie?: never;
-    };
-    requestBody?: never;
-    responses: {
-      200: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/json': components['schemas']['ProofDto'];
-        };
-      };
-      /** @description Not signed in, or no known API key */
-      401: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/problem+json': components['schemas']['ProblemDto'];
-        };
-      };
-      /** @description Not allowed */
-      403: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/problem+json': components['schemas']['ProblemDto'];
-        };
-      };
-      /** @description Too many requests; wait as `Retry-After` says */
-      429: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/problem+json': components['schemas']['ProblemDto'];
-        };
-      };
-    };
-  };
-  Site_site: {
-    parameters: {
-      query?: never;
-      header?: never;
-      path?: never;
-      cookie?: never;
-    };
-    requestBody?: never;
-    responses: {
-      200: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/json': components['schemas']['SiteDto'];
-        };
-      };
-      /** @description Not signed in, or no known API key */
-      401: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/problem+json': components['schemas']['ProblemDto'];
-        };
-      };
-      /** @description Not allowed */
-      403: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/problem+json': components['schemas']['ProblemDto'];
-        };
-      };
-      /** @description Too many requests; wait as `Retry-After` says */
-      429: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/problem+json': components['schemas']['ProblemDto'];
-        };
-      };
-    };
-  };
-  Site_health: {
-    parameters: {
-      query?: never;
-      header?: never;
-      path?: never;
-      cookie?: never;
-    };
-    requestBody?: never;
-    responses: {
-      200: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/json': components['schemas']['HealthDto'];
-        };
-      };
-      /** @description Not signed in, or no known API key */
-      401: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/problem+json': components['schemas']['ProblemDto'];
-        };
-      };
-      /** @description Not allowed */
-      403: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/problem+json': components['schemas']['ProblemDto'];
-        };
-      };
-      /** @description Too many requests; wait as `Retry-After` says */
-      429: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/problem+json': components['schemas']['ProblemDto'];
-        };
-      };
-      /** @description Can't be stored now; send again as `Retry-After` says */
-      503: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/problem+json': components['schemas']['ProblemDto'];
-        };
-      };
     };
-  };
 }
