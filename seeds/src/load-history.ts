@@ -3,15 +3,15 @@ import type { StationPrincipal } from '@ampkeep/ingest-api/dist/auth/principals.
 import { ResultsService } from '@ampkeep/ingest-api/dist/results/results.service.js';
 import type { INestApplicationContext } from '@nestjs/common';
 import type { StationKeys } from './database/station-keys.js';
-import type { HistoryPost } from './history/build-history.js';
+import type { DeliveryGroup } from './history/history-groups.js';
 
 export interface HistorySteps {
   before(at: Date): void;
-  after(at: Date, group: readonly HistoryPost[]): Promise<void>;
+  after(at: Date, group: DeliveryGroup): Promise<void>;
 }
 
-/** Posts that are under way together: as many as the writer commits as one group. */
-const TOGETHER = 200;
+/** Groups of a history, whether they are there or still being made. */
+export type HistorySource = Iterable<DeliveryGroup> | AsyncIterable<DeliveryGroup>;
 
 /**
  * Hands a history to the same intake that takes the stations' posts, in the order of arrival. Rejects at the
@@ -21,35 +21,21 @@ const TOGETHER = 200;
  */
 export async function loadHistory(
   app: INestApplicationContext,
-  keys: StationKeys,
-  history: Iterable<HistoryPost>,
+  principals: (station: string) => StationPrincipal,
+  history: HistorySource,
   steps: HistorySteps,
 ): Promise<void> {
   const results = app.get(ResultsService, { strict: false });
-  const principals = stationPrincipals(app, keys);
-  for (const group of inGroups(history, TOGETHER)) {
-    const at = group.at(-1)?.receivedAt ?? new Date(0);
+  for await (const group of history) {
+    const at = new Date(group.at(-1)?.receivedAt ?? 0);
     steps.before(at);
     await Promise.all(
-      group.map(({ station, receivedAt, post }) =>
-        results.record(Buffer.from(JSON.stringify(post)), principals(station), {
-          seeded: true,
-          receivedAt: receivedAt.getTime(),
-        }),
+      group.map(({ station, receivedAt, body }) =>
+        results.record(Buffer.from(body), principals(station), { seeded: true, receivedAt }),
       ),
     );
     await steps.after(at, group);
   }
-}
-
-function* inGroups<Item>(items: Iterable<Item>, size: number): Generator<Item[], void> {
-  let group: Item[] = [];
-  for (const item of items) {
-    if (group.push(item) < size) continue;
-    yield group;
-    group = [];
-  }
-  if (group.length > 0) yield group;
 }
 
 /** What the access guard would find for each station's key; looked up once a station. */

@@ -10,6 +10,7 @@ import { afterAll, beforeAll, describe, expect, it } from 'vitest';
 import { inspectDatabase, removeDemoDatabase } from './database/demo-database.js';
 import { stationKeyFile } from './database/station-keys.js';
 import { buildHistory, demoHistory } from './history/build-history.js';
+import { historyGroups } from './history/history-groups.js';
 import { judgePost } from './history/judge-post.js';
 import { seedDatabase } from './seed-database.js';
 
@@ -26,7 +27,7 @@ beforeAll(async () => {
     AMPKEEP_PORT: '0',
     AMPKEEP_LOG_LEVEL: 'silent',
   });
-  await seedDatabase({ env, now, days, report: (line) => lines.push(line) });
+  await seedDatabase({ env, now, days, makeHistory: historyGroups, report: (line) => lines.push(line) });
 }, 120_000);
 
 afterAll(() => rm(dataDir, { recursive: true }));

@@ -3,14 +3,16 @@ import { createApp } from '@ampkeep/ingest-api/dist/create-app.js';
 import { runStatement } from '@ampkeep/ingest-api/dist/database/sql.js';
 import { Writer } from '@ampkeep/ingest-api/dist/database/writer.js';
 import { SiteSetupService } from '@ampkeep/ingest-api/dist/site-setup/site-setup.service.js';
+import type { ResultPost } from '@ampkeep/station-sim/dist/types/result-post.js';
 import type { INestApplicationContext } from '@nestjs/common';
 import { createDemoAccounts } from './database/create-demo-accounts.js';
 import { SEEDED_AT } from './database/demo-database.js';
 import { acknowledgeOne, closeQuietBreaches, findQualityLead } from './database/handle-breaches.js';
 import { stationKeys } from './database/station-keys.js';
-import { buildHistory, demoHistory, type HistoryPost } from './history/build-history.js';
-import { judgePost } from './history/judge-post.js';
-import { loadHistory, stationPrincipals } from './load-history.js';
+import { demoHistory, type HistoryOptions } from './history/build-history.js';
+import type { DeliveryGroup } from './history/history-groups.js';
+import { historyFromThread } from './history/history-thread.js';
+import { type HistorySource, loadHistory, stationPrincipals } from './load-history.js';
 import { loadRefusedPosts } from './load-refused-posts.js';
 import { refusedPosts } from './scenario/refused-posts.js';
 import { describeSite } from './scenario/site-description.js';
@@ -22,6 +24,8 @@ export interface SeedOptions {
   days?: number;
   /** Same seed and end, same history. */
   seed?: string;
+  /** Makes the history; in a thread of its own if nothing else is said. */
+  makeHistory?: (options: HistoryOptions) => HistorySource;
   report: (line: string) => void;
 }
 
@@ -39,6 +43,7 @@ export async function seedDatabase({
   now,
   days = demoHistory.days,
   seed = demoHistory.seed,
+  makeHistory = historyFromThread,
   report,
 }: SeedOptions): Promise<void> {
   const setUpAt = new Date(now.getTime() - (days + SET_UP_DAYS_BEFORE) * 24 * HOUR_MS);
@@ -54,7 +59,8 @@ export async function seedDatabase({
 
     report(`A history of ${days} days`);
     const progress = createProgress(now, days, report);
-    await loadHistory(app, keys, buildHistory({ ...demoHistory, days, seed, now }, judgePost), {
+    const principals = stationPrincipals(app, keys);
+    await loadHistory(app, principals, makeHistory({ ...demoHistory, days, seed, now }), {
       before: (at) => {
         time = at.getTime();
       },
@@ -66,7 +72,7 @@ export async function seedDatabase({
     time = now.getTime();
     await acknowledgeOne(app, qualityLead);
     const refused = refusedPosts(progress.example()).filter(({ hoursAgo }) => hoursAgo < days * 24);
-    await loadRefusedPosts(app, stationPrincipals(app, keys), refused, (hoursAgo) => {
+    await loadRefusedPosts(app, principals, refused, (hoursAgo) => {
       time = now.getTime() - hoursAgo * HOUR_MS;
     });
     time = now.getTime();
@@ -81,11 +87,11 @@ export async function seedDatabase({
 function createProgress(now: Date, days: number, report: (line: string) => void) {
   let loaded = 0;
   let reported = 0;
-  let example: HistoryPost['post'] | undefined;
+  let example: ResultPost | undefined;
   return {
-    add(group: readonly HistoryPost[], at: Date) {
+    add(group: DeliveryGroup, at: Date) {
       loaded += group.length;
-      example ??= group.find(({ post }) => isOrdinary(post))?.post;
+      example ??= group.map(({ body }) => JSON.parse(body) as ResultPost).find(isOrdinary);
       if (loaded - reported < REPORT_EVERY) return;
       reported = loaded;
       const day = days - Math.floor((now.getTime() - at.getTime()) / (24 * HOUR_MS));
@@ -99,7 +105,7 @@ function createProgress(now: Date, days: number, report: (line: string) => void)
   };
 }
 
-const isOrdinary = ({ partNumber, runKind, outcome }: HistoryPost['post']): boolean =>
+const isOrdinary = ({ partNumber, runKind, outcome }: ResultPost): boolean =>
   partNumber === 'FH-R500-W' && runKind === 'production' && outcome === 'completed';
 
 async function markSeeded(app: INestApplicationContext, now: Date): Promise<void> {
