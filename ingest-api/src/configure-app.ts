@@ -8,8 +8,9 @@ import { InvalidError } from './common/errors.js';
 import { ProblemFilter } from './common/problem.filter.js';
 import { pointerOf } from './results/parse-post.js';
 
-/** Bodies that the station routes read themselves, after the key was checked. */
-const readsItsOwnBody = (request: Request): boolean => request.path.startsWith('/api/v1/results');
+/** Bodies that the station routes read themselves, after the key was checked. Routes match in any case. */
+const readsItsOwnBody = (request: Request): boolean =>
+  request.path.toLowerCase().startsWith('/api/v1/results');
 
 /** Everything that wraps the routes; shared by main and the tests. */
 export function configureApp(app: INestApplication): void {

@@ -221,6 +221,14 @@ describe('posting a result', () => {
       expect(chunked.status).toBe(413);
     });
 
+    it('is accepted at the same address in capitals, with a slash or a question behind it', async () => {
+      for (const path of ['/API/V1/RESULTS', '/api/v1/results/', '/api/v1/results?line=2']) {
+        const post = aResult({ serialNumber: path });
+        const server = test.app.getHttpServer();
+        await request(server).post(path).set('X-API-Key', otherKey).send(post).expect(201);
+      }
+    });
+
     it('is answered 404 at an address beside the right one', async () => {
       for (const path of ['/api/v1/result', '/api/v2/results', '/api/v1/results/x/y']) {
         const answer = await request(test.app.getHttpServer()).post(path).send('{}');
